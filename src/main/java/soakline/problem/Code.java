@@ -1,0 +1,136 @@
+package soakline.problem;
+
+/**
+ * Every thing the program can tell a user. The sentence of each stands under the same name in {@code wording}; a test holds
+ * the two together.
+ */
+public enum Code {
+    // ---- wrong use: an option or argument ----
+    OPTION_BAD(Kind.USE),
+    OPTION_UNKNOWN_FIX(Kind.USE),
+    MISSING_THICKNESS(Kind.USE),
+    MISSING_FACES(Kind.USE),
+    MISSING_WIDTH_LENGTH(Kind.USE),
+    OUTPUT_NOT_WRITABLE(Kind.USE),
+    OUTPUT_TYPE_UNKNOWN(Kind.USE),
+
+    // ---- input that cannot be read or used ----
+    FILE_NOT_FOUND(Kind.INPUT),
+    FILE_NOT_READABLE(Kind.INPUT),
+    FILE_EMPTY(Kind.INPUT),
+    FILE_BINARY(Kind.INPUT),
+    FILE_FAILED(Kind.INPUT),
+    LINE_TOO_LONG(Kind.INPUT),
+    TOO_LARGE(Kind.INPUT),
+    HEADER_MISSING(Kind.INPUT),
+    TIME_COLUMN_MISSING(Kind.INPUT),
+    TIME_COLUMN_TWICE(Kind.INPUT),
+    VALUE_COLUMN_MISSING(Kind.INPUT),
+    COLUMN_UNIT_MISSING(Kind.INPUT),
+    COLUMN_UNIT_UNKNOWN(Kind.INPUT),
+    FACT_NOT_A_QUANTITY(Kind.INPUT),
+    FACT_UNIT_MISSING(Kind.INPUT),
+    FACT_UNIT_UNKNOWN(Kind.INPUT),
+    FACT_NOT_POSITIVE(Kind.INPUT),
+    FACT_NOT_ONE_OF(Kind.INPUT),
+    TIME_NOT_UNDERSTOOD(Kind.INPUT),
+    DATE_PATTERN_BAD(Kind.INPUT),
+    TOO_FEW_WEIGHINGS(Kind.INPUT),
+    TIMES_ALL_EQUAL(Kind.INPUT),
+    VALUES_ALL_EQUAL(Kind.INPUT),
+    SAMPLE_MISSING(Kind.INPUT),
+
+    // ---- notes on what was read ----
+    CELL_NOT_A_NUMBER(Kind.NOTE),
+    CELL_NOT_FINITE(Kind.NOTE),
+    TIME_CELL_BAD(Kind.NOTE),
+    ROWS_SORTED(Kind.NOTE),
+    TIMES_REPEATED(Kind.NOTE),
+    CELLS_EMPTY(Kind.NOTE),
+    MORE_NOTES(Kind.NOTE),
+    EDGES_TAKEN_SEALED(Kind.NOTE),
+    FACT_UNKNOWN_KEPT(Kind.NOTE),
+    FACT_REPEATED(Kind.NOTE),
+    CONTENT_FROM_FIRST_WEIGHING(Kind.NOTE),
+    BEFORE_EXPOSURE(Kind.NOTE),
+    CLOCK_CHANGE(Kind.NOTE),
+    SIZE_IGNORED_EDGES_SEALED(Kind.NOTE),
+
+    // ---- warnings: the result stands, look again ----
+    THICKNESS_UNLIKELY(Kind.WARNING),
+    BELOW_DRY_MASS(Kind.WARNING),
+    CONTENT_UNLIKELY(Kind.WARNING),
+    DIFFUSIVITY_UNLIKELY(Kind.WARNING),
+    THICKNESS_UNCERTAINTY_UNKNOWN(Kind.NOTE),
+
+    // ---- the estimate ----
+    NOT_CONVERGED(Kind.RESULT),
+    SINGULAR(Kind.RESULT),
+    AT_A_LIMIT(Kind.RESULT),
+    NOT_DETERMINED_OPEN(Kind.RESULT),
+    NOT_DETERMINED_WIDE(Kind.RESULT),
+    NOT_FICKIAN(Kind.WARNING),
+    PARAMETER_ALL_FIXED(Kind.USE),
+
+    // ---- checks, one sentence a verdict ----
+    CHECK_UNKNOWN(Kind.NOTE),
+    CHECK_RESIDUALS_ZERO(Kind.NOTE),
+    SHORT_TIME_PASS(Kind.NOTE),
+    SHORT_TIME_DIFFERS(Kind.NOTE),
+    HALF_TIME_PASS(Kind.NOTE),
+    HALF_TIME_DIFFERS(Kind.NOTE),
+    LATE_TIME_PASS(Kind.NOTE),
+    LATE_TIME_DIFFERS(Kind.NOTE),
+    MEAN_TIME_PASS(Kind.NOTE),
+    MEAN_TIME_DIFFERS(Kind.NOTE),
+    PLATEAU_PASS(Kind.NOTE),
+    PLATEAU_SHORT(Kind.NOTE),
+    PLATEAU_NOT_REACHED(Kind.NOTE),
+    RUNS_PASS(Kind.NOTE),
+    RUNS_FEW(Kind.NOTE),
+    AUTOCORRELATION_PASS(Kind.NOTE),
+    AUTOCORRELATION_POSITIVE(Kind.NOTE),
+    NORMALITY_PASS(Kind.NOTE),
+    NORMALITY_DIFFERS(Kind.NOTE),
+    LARGEST_PASS(Kind.NOTE),
+    LARGEST_STANDS_OUT(Kind.NOTE),
+    FICKIAN_PASS(Kind.NOTE),
+    FICKIAN_CAUTION(Kind.NOTE),
+    FICKIAN_FAIL(Kind.NOTE),
+    FICKIAN_UNKNOWN(Kind.NOTE),
+
+    // ---- cautions: safety and use ----
+    CAUTION_APPARENT(Kind.CAUTION),
+    CAUTION_NOT_FICKIAN(Kind.CAUTION),
+    CAUTION_OVEN(Kind.CAUTION),
+    CAUTION_DRYING_CHANGES(Kind.CAUTION),
+    CAUTION_TRAPPED_MOISTURE(Kind.CAUTION),
+    CAUTION_HYDROGEN(Kind.CAUTION),
+
+    // ---- the program itself ----
+    NO_DISPLAY(Kind.NOTE),
+    UNEXPECTED(Kind.INPUT);
+
+    /** What a code means for the work and for the exit status. */
+    public enum Kind {
+        /** Wrong use of the command: exit status 2. */
+        USE,
+        /** Unreadable or unusable input: exit status 3. */
+        INPUT,
+        /** A result that is marked as not usable: exit status 1. */
+        RESULT,
+        WARNING,
+        NOTE,
+        CAUTION
+    }
+
+    private final Kind kind;
+
+    Code(Kind kind) {
+        this.kind = kind;
+    }
+
+    public Kind kind() {
+        return kind;
+    }
+}
