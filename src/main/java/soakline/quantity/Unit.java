@@ -42,6 +42,8 @@ public enum Unit {
 
     private final Dimension dimension;
     private final double factor;
+
+    @SuppressWarnings("ImmutableEnumChecker") // made by List.of
     private final List<String> spellings;
 
     Unit(Dimension dimension, double factor, String... spellings) {

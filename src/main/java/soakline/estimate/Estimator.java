@@ -1,0 +1,77 @@
+package soakline.estimate;
+
+import java.util.Arrays;
+import soakline.numeric.LinearLeastSquares;
+import soakline.problem.Code;
+import soakline.problem.Fault;
+import soakline.specimen.ContentSeries;
+
+/** From a task to its estimate, by a scan for start values and Levenberg–Marquardt. Stateless. */
+public final class Estimator {
+
+    private Estimator() {}
+
+    /**
+     * Estimates the free parameters. No start value is ever asked for.
+     *
+     * <p>Where the fit did not converge or is singular the result says so ({@link Estimate#ending()}); it is for the caller to
+     * show no number then.
+     *
+     * @throws Fault when no parameter is free, or there are fewer weighings than parameters and one
+     */
+    public static Estimate estimate(EstimationTask task) {
+        int free = task.free().length;
+        if (free == 0) {
+            throw Fault.of(Code.PARAMETER_ALL_FIXED);
+        }
+        int size = task.data().size();
+        if (size <= free) {
+            throw Fault.of(Code.TOO_FEW_WEIGHINGS, size, free + 1);
+        }
+        if (size <= StartScan.MOST_WEIGHINGS) {
+            return refit(task, new StartScan(task, task.data()).best());
+        }
+        ContentSeries thinned = thin(task.data());
+        EstimationTask small = task.withData(thinned);
+        double[] start = new StartScan(small, thinned).best();
+        Estimate near = refit(small, start);
+        return refit(task, near.isOptimum() ? near.working() : start);
+    }
+
+    /**
+     * Estimates from start values that are known to be near, such as those of a neighbouring task.
+     *
+     * @param start all working values; those of fixed parameters are not looked at
+     */
+    public static Estimate refit(EstimationTask task, double[] start) {
+        LevenbergMarquardt.Solution solution = LevenbergMarquardt.solve(new ContentResiduals(task), task.reduce(start));
+        int free = task.free().length;
+        int degreesOfFreedom = task.data().size() - free;
+        double variance = solution.sumOfSquares() / degreesOfFreedom;
+        double[][] covariance = new double[0][];
+        if (solution.ending() != LevenbergMarquardt.Ending.SINGULAR
+                && LinearLeastSquares.isRegular(solution.triangle(), free)) {
+            covariance = LinearLeastSquares.unscaledCovariance(solution.triangle(), free);
+        }
+        return new Estimate(task, task.complete(solution.point()), covariance, variance, solution);
+    }
+
+    /** About 512 weighings: half of them even by number, half crowded towards the start, where a fast coupon does its all. */
+    private static ContentSeries thin(ContentSeries data) {
+        int n = data.size();
+        int half = StartScan.MOST_WEIGHINGS / 2;
+        int[] picks = new int[2 * half];
+        for (int k = 0; k < half; k++) {
+            picks[2 * k] = (int) ((long) k * (n - 1) / (half - 1));
+            picks[2 * k + 1] = (int) (Math.pow(n, (double) k / (half - 1)) - 1);
+        }
+        int[] sorted = Arrays.stream(picks).distinct().sorted().toArray();
+        double[] times = new double[sorted.length];
+        double[] contents = new double[sorted.length];
+        for (int k = 0; k < sorted.length; k++) {
+            times[k] = data.time(sorted[k]);
+            contents[k] = data.content(sorted[k]);
+        }
+        return ContentSeries.of(times, contents);
+    }
+}

@@ -1,0 +1,104 @@
+package soakline.estimate;
+
+import soakline.specimen.ContentSeries;
+import soakline.uptake.UptakeModel;
+
+/**
+ * Start values, so that the user never has to guess: each of the model's candidate shapes in turn, with the contents, which enter
+ * linearly, solved exactly; the one with the smallest sum of squares wins.
+ */
+final class StartScan {
+
+    /** More weighings than this are thinned for the scan only. */
+    static final int MOST_WEIGHINGS = 512;
+
+    private final EstimationTask task;
+    private final double[] times;
+    private final double[] contents;
+    private final double shift;
+
+    private double bestSum = Double.POSITIVE_INFINITY;
+    private double[] best;
+
+    StartScan(EstimationTask task, ContentSeries data) {
+        this.task = task;
+        this.times = data.times();
+        this.contents = data.contents();
+        // the contents are measured from the first one, so that the sums below do not cancel
+        this.shift = contents[0];
+        for (int i = 0; i < contents.length; i++) {
+            contents[i] -= shift;
+        }
+    }
+
+    /**
+     * All working values of the best candidate.
+     */
+    double[] best() {
+        UptakeModel model = task.model();
+        double last = times[times.length - 1];
+        double first = last;
+        for (double t : times) {
+            if (t > 0) {
+                first = t;
+                break;
+            }
+        }
+        double[] g = new double[times.length];
+        for (double[] candidate : model.starts(first, last)) {
+            for (int k = 0; k < candidate.length; k++) {
+                candidate[k] = task.fixedAt(k).orElse(candidate[k]);
+            }
+            model.evaluate(times, times.length, candidate, g, null);
+            consider(candidate, g);
+        }
+        return best;
+    }
+
+    private void consider(double[] shape, double[] g) {
+        // normal equations of content = M0 (1 − g) + M∞ g, enough for a start value
+        double aa = 0;
+        double ab = 0;
+        double bb = 0;
+        double ay = 0;
+        double by = 0;
+        double yy = 0;
+        for (int i = 0; i < g.length; i++) {
+            double b = g[i];
+            double a = 1 - b;
+            double y = contents[i];
+            aa += a * a;
+            ab += a * b;
+            bb += b * b;
+            ay += a * y;
+            by += b * y;
+            yy += y * y;
+        }
+        boolean startFixed = task.isFixed(task.startIndex());
+        boolean levelFixed = task.form() == LevelForm.EQUILIBRIUM && task.isFixed(task.levelIndex());
+        double start = startFixed ? task.fixedAt(task.startIndex()).getAsDouble() - shift : 0;
+        double level = levelFixed ? task.fixedAt(task.levelIndex()).getAsDouble() - shift : 0;
+        double determinant = aa * bb - ab * ab;
+        if (!startFixed && !levelFixed && determinant > 1e-14 * aa * bb) {
+            start = (ay * bb - by * ab) / determinant;
+            level = (by * aa - ay * ab) / determinant;
+        } else if (startFixed && !levelFixed && bb > 0) {
+            level = (by - ab * start) / bb;
+        } else if (!startFixed && levelFixed && aa > 0) {
+            start = (ay - ab * level) / aa;
+        } else if (!(startFixed && levelFixed)) {
+            return;
+        }
+        double sum =
+                yy - 2 * (start * ay + level * by) + start * start * aa + 2 * start * level * ab + level * level * bb;
+        if (sum < bestSum || best == null) {
+            bestSum = sum;
+            best = new double[shape.length + 2];
+            System.arraycopy(shape, 0, best, 0, shape.length);
+            best[task.startIndex()] = start + shift;
+            best[task.levelIndex()] = task.form() == LevelForm.EQUILIBRIUM
+                    ? level + shift
+                    : (level - start) * task.model().initialSlope(shape);
+        }
+    }
+}
