@@ -10,7 +10,8 @@ import soakline.uptake.UptakeModel;
  */
 final class ContentResiduals implements ResidualModel {
 
-    private static final double ROUNDING = 4e-16;
+    /** Of the largest content: what rounding of masses many times the content leaves. */
+    private static final double ROUNDING = 5e-14;
 
     private final EstimationTask task;
     private final ContentSeries data;

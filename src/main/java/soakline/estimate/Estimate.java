@@ -112,7 +112,7 @@ public final class Estimate {
 
     /** Whether the scatter is no more than rounding, so that nothing can be judged by it. */
     public boolean isWithoutScatter() {
-        return sumOfSquares() <= 16 * new ContentResiduals(task).roundingFloor();
+        return sumOfSquares() <= 4 * new ContentResiduals(task).roundingFloor();
     }
 
     public int evaluations() {

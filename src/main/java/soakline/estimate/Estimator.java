@@ -44,16 +44,31 @@ public final class Estimator {
      * @param start all working values; those of fixed parameters are not looked at
      */
     public static Estimate refit(EstimationTask task, double[] start) {
-        LevenbergMarquardt.Solution solution = LevenbergMarquardt.solve(new ContentResiduals(task), task.reduce(start));
+        ContentResiduals residuals = new ContentResiduals(task);
+        LevenbergMarquardt.Solution solution = LevenbergMarquardt.solve(residuals, task.reduce(start));
         int free = task.free().length;
         int degreesOfFreedom = task.data().size() - free;
-        double variance = solution.sumOfSquares() / degreesOfFreedom;
+        // data on the curve to the last digit still carry the rounding of their digits
+        double variance = Math.max(solution.sumOfSquares(), residuals.roundingFloor()) / degreesOfFreedom;
         double[][] covariance = new double[0][];
         if (solution.ending() != LevenbergMarquardt.Ending.SINGULAR
                 && LinearLeastSquares.isRegular(solution.triangle(), free)) {
             covariance = LinearLeastSquares.unscaledCovariance(solution.triangle(), free);
         }
         return new Estimate(task, task.complete(solution.point()), covariance, variance, solution);
+    }
+
+    /** The sum of squares of a task of which every parameter is fixed. */
+    public static double sumOfSquares(EstimationTask task) {
+        double[] working = new double[task.parameters().size()];
+        for (int i = 0; i < working.length; i++) {
+            working[i] = task.fixedAt(i).orElseThrow();
+        }
+        double sum = 0;
+        for (double r : new Estimate(task, working, new double[0][], Double.NaN, null).residuals()) {
+            sum += r * r;
+        }
+        return sum;
     }
 
     /** About 512 weighings: half of them even by number, half crowded towards the start, where a fast coupon does its all. */

@@ -1,19 +1,20 @@
 package soakline.inference;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import soakline.estimate.Estimate;
 import soakline.estimate.EstimationTask;
 import soakline.estimate.Estimator;
+import soakline.estimate.LevenbergMarquardt;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Finding;
-import soakline.specimen.Edges;
 import soakline.specimen.Run;
 import soakline.specimen.Sheet;
-import soakline.uptake.FickianModel;
 
 /** From a run to everything there is to say about it. */
 public final class Assessor {
@@ -27,59 +28,163 @@ public final class Assessor {
      */
     public static Assessment assess(Run run, AssessmentOptions options) {
         Sheet sheet = run.sheet();
-        EstimationTask task = EstimationTask.of(model(sheet), run.contents());
+        EstimationTask task = task(run, sheet, options);
         Estimate estimate = Estimator.estimate(task);
-        List<ParameterResult> parameters = new ArrayList<>();
-        for (int i : new int[] {0, task.levelIndex(), task.startIndex()}) {
-            double low = estimate.working(i) - 2 * estimate.workingStandardError(i);
-            double high = estimate.working(i) + 2 * estimate.workingStandardError(i);
-            parameters.add(new ParameterResult(
-                    task.parameters().get(i),
-                    OptionalDouble.of(estimate.value(i)),
-                    OptionalDouble.of(estimate.standardError(i)),
-                    false,
-                    Optional.of(new Interval(
-                            options.level(),
-                            IntervalMethod.LINEARISED,
-                            OptionalDouble.of(task.parameters().get(i).fromWorking(low)),
-                            OptionalDouble.of(task.parameters().get(i).fromWorking(high))))));
+        List<Finding> problems = new ArrayList<>(Plausibility.ofInput(run, task.data(), estimate));
+        if (!estimate.isOptimum()) {
+            return withoutResult(run, estimate, problems);
         }
+        Identifiability identifiability = Identifiability.of(estimate);
+        boolean determined = identifiability.isDetermined();
+        identifiability.refusal().ifPresent(problems::add);
+        if (determined) {
+            problems.addAll(Plausibility.ofResult(estimate));
+        }
+        ResidualSpace space = new ResidualSpace(estimate);
+        ShapeChecks shape = new ShapeChecks(space, determined, options.level());
+        List<Check> checks = checks(space, shape, identifiability);
+        Verdict fickian = FickianVerdict.of(checks, run, task.data(), estimate.residualStandardDeviation(), determined);
+        if (fickian == Verdict.FAIL) {
+            problems.add(Finding.of(Code.NOT_FICKIAN));
+        }
+        Direction direction = direction(estimate);
         return new Assessment(
                 run,
                 estimate,
-                estimate.rise() >= 0 ? Direction.UPTAKE : Direction.DRYING,
-                parameters,
-                Optional.empty(),
-                List.of(new Check(
-                        CheckName.SHORT_TIME_SLOPE,
-                        Verdict.PASS,
-                        OptionalDouble.of(estimate.diffusivity()),
-                        OptionalDouble.empty(),
-                        OptionalDouble.empty(),
-                        OptionalDouble.of(1),
-                        OptionalDouble.of(0.5),
-                        List.of(new Check.Figure("intercept", 0)),
-                        Finding.of(Code.SHORT_TIME_PASS, 1.0))),
-                Optional.of(new ShortTimeLine(
-                        estimate.rise() * estimate.model().initialSlope(estimate.shape()),
-                        estimate.startContent(),
-                        Math.sqrt(estimate.model().meanTime(estimate.shape())))),
-                true,
-                true,
-                Verdict.PASS,
-                Finding.of(Code.FICKIAN_PASS),
-                List.of(),
-                run.notes(),
-                List.of(Finding.of(Code.CAUTION_APPARENT)));
+                direction,
+                determined ? parameters(estimate, options) : parametersOfShortTest(estimate, options),
+                determined && !task.isFixed(0)
+                        ? Optional.of(UncertaintyBudget.of(estimate, sheet, options.level()))
+                        : Optional.empty(),
+                checks,
+                shape.shortTimeLine(),
+                determined,
+                determined,
+                fickian,
+                FickianVerdict.finding(fickian),
+                problems,
+                Plausibility.notes(run),
+                Cautions.of(direction, fickian));
     }
 
-    /** The model of a coupon: the plane sheet, or with bare edges the product solution. */
-    public static FickianModel model(Sheet sheet) {
-        FickianModel plain = FickianModel.through(sheet.path());
-        return sheet.edges() == Edges.BARE
-                ? plain.with(
-                        sheet.width().orElseThrow().si() / 2,
-                        sheet.length().orElseThrow().si() / 2)
-                : plain;
+    private static EstimationTask task(Run run, Sheet sheet, AssessmentOptions options) {
+        EstimationTask task = EstimationTask.of(Coupons.model(sheet), run.contents());
+        for (Map.Entry<String, Double> fixed : options.fixed().entrySet()) {
+            int parameter = task.indexOf(fixed.getKey());
+            task = task.withFixed(parameter, task.parameters().get(parameter).toWorking(fixed.getValue()));
+        }
+        return task;
+    }
+
+    private static Direction direction(Estimate estimate) {
+        return estimate.rise() >= 0 ? Direction.UPTAKE : Direction.DRYING;
+    }
+
+    private static List<Check> checks(ResidualSpace space, ShapeChecks shape, Identifiability identifiability) {
+        List<Check> checks = new ArrayList<>();
+        if (space.estimate().isWithoutScatter()) {
+            for (CheckName name : CheckName.values()) {
+                checks.add(
+                        name == CheckName.PLATEAU
+                                ? identifiability.plateau(space.estimate())
+                                : Check.unknown(name, Finding.of(Code.CHECK_RESIDUALS_ZERO)));
+            }
+            return checks;
+        }
+        List<Evidence> evidence = new ArrayList<>(shape.all());
+        evidence.addAll(new ResidualChecks(space).all());
+        checks.addAll(Evidence.judge(evidence));
+        checks.add(identifiability.plateau(space.estimate()));
+        checks.sort(Comparator.comparing(Check::name));
+        return checks;
+    }
+
+    private static List<ParameterResult> parameters(Estimate estimate, AssessmentOptions options) {
+        EstimationTask task = estimate.task();
+        List<ParameterResult> results = new ArrayList<>();
+        for (int i = 0; i < task.shapeCount(); i++) {
+            results.add(result(estimate, i, options));
+        }
+        results.add(result(estimate, task.levelIndex(), options));
+        results.add(result(estimate, task.startIndex(), options));
+        return results;
+    }
+
+    private static ParameterResult result(Estimate estimate, int parameter, AssessmentOptions options) {
+        boolean fixed = estimate.task().isFixed(parameter);
+        return new ParameterResult(
+                estimate.parameters().get(parameter),
+                OptionalDouble.of(estimate.value(parameter)),
+                fixed ? OptionalDouble.empty() : OptionalDouble.of(estimate.standardError(parameter)),
+                fixed,
+                fixed
+                        ? Optional.empty()
+                        : Optional.of(Intervals.of(estimate, parameter, options.level(), options.method())));
+    }
+
+    /** D and M∞ without values; the start content and the initial slope with theirs. */
+    private static List<ParameterResult> parametersOfShortTest(Estimate estimate, AssessmentOptions options) {
+        EstimationTask task = estimate.task();
+        List<ParameterResult> results = new ArrayList<>();
+        for (int i = 0; i < task.shapeCount(); i++) {
+            results.add(withoutValue(task, i));
+        }
+        results.add(withoutValue(task, task.levelIndex()));
+        results.add(result(estimate, task.startIndex(), options));
+        if (!task.isFixed(task.levelIndex())) {
+            EstimationTask slopeTask = task.withInitialSlope();
+            double[] start = estimate.working();
+            start[task.levelIndex()] = estimate.rise() * estimate.model().initialSlope(estimate.shape());
+            Estimate slope = Estimator.refit(slopeTask, start);
+            if (slope.isOptimum()) {
+                results.add(result(slope, slopeTask.levelIndex(), options));
+            }
+        }
+        return results;
+    }
+
+    private static ParameterResult withoutValue(EstimationTask task, int parameter) {
+        return new ParameterResult(
+                task.parameters().get(parameter),
+                OptionalDouble.empty(),
+                OptionalDouble.empty(),
+                task.isFixed(parameter),
+                Optional.empty());
+    }
+
+    /** The fit itself failed: every parameter without a value, every check without a verdict. */
+    private static Assessment withoutResult(Run run, Estimate estimate, List<Finding> problems) {
+        problems.add(
+                estimate.ending() == LevenbergMarquardt.Ending.SINGULAR
+                        ? Finding.of(Code.SINGULAR)
+                        : Finding.of(Code.NOT_CONVERGED, estimate.evaluations()));
+        EstimationTask task = estimate.task();
+        List<ParameterResult> results = new ArrayList<>();
+        for (int i = 0; i < task.shapeCount(); i++) {
+            results.add(withoutValue(task, i));
+        }
+        results.add(withoutValue(task, task.levelIndex()));
+        results.add(withoutValue(task, task.startIndex()));
+        List<Check> checks = new ArrayList<>();
+        for (CheckName name : CheckName.values()) {
+            checks.add(Check.unknown(name, Finding.of(Code.CHECK_UNKNOWN, "there is no fitted curve")));
+        }
+        double[] contents = task.data().contents();
+        Direction direction = contents[contents.length - 1] >= contents[0] ? Direction.UPTAKE : Direction.DRYING;
+        return new Assessment(
+                run,
+                estimate,
+                direction,
+                results,
+                Optional.empty(),
+                checks,
+                Optional.empty(),
+                false,
+                false,
+                Verdict.UNKNOWN,
+                FickianVerdict.finding(Verdict.UNKNOWN),
+                problems,
+                Plausibility.notes(run),
+                Cautions.of(direction, Verdict.UNKNOWN));
     }
 }

@@ -35,4 +35,18 @@ public record Check(
     public Check {
         figures = List.copyOf(figures);
     }
+
+    /** A check that could not be made. */
+    static Check unknown(CheckName name, Finding why) {
+        return new Check(
+                name,
+                Verdict.UNKNOWN,
+                OptionalDouble.empty(),
+                OptionalDouble.empty(),
+                OptionalDouble.empty(),
+                OptionalDouble.empty(),
+                OptionalDouble.empty(),
+                List.of(),
+                why);
+    }
 }

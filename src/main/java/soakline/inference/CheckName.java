@@ -6,6 +6,7 @@ public enum CheckName {
     HALF_TIME("half-time", "half-time"),
     LATE_TIME_SLOPE("late-time-slope", "late-time slope"),
     MEAN_TIME("mean-time", "mean time"),
+    TIME_EXPONENT("time-exponent", "time exponent"),
     PLATEAU("plateau", "plateau"),
     RESIDUAL_RUNS("residual-runs", "residual runs"),
     RESIDUAL_AUTOCORRELATION("residual-autocorrelation", "residual autocorrelation"),

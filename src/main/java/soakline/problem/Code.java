@@ -54,7 +54,6 @@ public enum Code {
     CONTENT_FROM_FIRST_WEIGHING(Kind.NOTE),
     BEFORE_EXPOSURE(Kind.NOTE),
     CLOCK_CHANGE(Kind.NOTE),
-    SIZE_IGNORED_EDGES_SEALED(Kind.NOTE),
 
     // ---- warnings: the result stands, look again ----
     THICKNESS_UNLIKELY(Kind.WARNING),
@@ -66,8 +65,8 @@ public enum Code {
     // ---- the estimate ----
     NOT_CONVERGED(Kind.RESULT),
     SINGULAR(Kind.RESULT),
-    AT_A_LIMIT(Kind.RESULT),
     NOT_DETERMINED_OPEN(Kind.RESULT),
+    NOT_DETERMINED_FAST(Kind.RESULT),
     NOT_DETERMINED_WIDE(Kind.RESULT),
     NOT_FICKIAN(Kind.WARNING),
     PARAMETER_ALL_FIXED(Kind.USE),
@@ -83,6 +82,8 @@ public enum Code {
     LATE_TIME_DIFFERS(Kind.NOTE),
     MEAN_TIME_PASS(Kind.NOTE),
     MEAN_TIME_DIFFERS(Kind.NOTE),
+    EXPONENT_PASS(Kind.NOTE),
+    EXPONENT_DIFFERS(Kind.NOTE),
     PLATEAU_PASS(Kind.NOTE),
     PLATEAU_SHORT(Kind.NOTE),
     PLATEAU_NOT_REACHED(Kind.NOTE),

@@ -24,12 +24,14 @@ public final class ContentSeries {
     private final double[] contents;
     private final int[] indices;
     private final Reference reference;
+    private final double referenceMass;
 
-    private ContentSeries(double[] times, double[] contents, int[] indices, Reference reference) {
+    private ContentSeries(double[] times, double[] contents, int[] indices, Reference reference, double referenceMass) {
         this.times = times;
         this.contents = contents;
         this.indices = indices;
         this.reference = reference;
+        this.referenceMass = referenceMass;
     }
 
     /** Contents as fractions, already known. Arrays are copied. */
@@ -38,7 +40,7 @@ public final class ContentSeries {
         for (int i = 0; i < indices.length; i++) {
             indices[i] = i;
         }
-        return new ContentSeries(times.clone(), contents.clone(), indices, Reference.AS_GIVEN);
+        return new ContentSeries(times.clone(), contents.clone(), indices, Reference.AS_GIVEN, Double.NaN);
     }
 
     static ContentSeries of(Run run) {
@@ -60,14 +62,15 @@ public final class ContentSeries {
         }
         requireDifferent(contents, run);
         Reference reference = Reference.AS_GIVEN;
+        double dry = Double.NaN;
         if (run.kind() == ValueKind.MASS) {
             reference = run.dryMass().isPresent() ? Reference.DRY_MASS : Reference.FIRST_WEIGHING;
-            double dry = run.dryMass().orElse(contents[0]);
+            dry = run.dryMass().orElse(contents[0]);
             for (int i = 0; i < n; i++) {
                 contents[i] = (contents[i] - dry) / dry;
             }
         }
-        return new ContentSeries(times, contents, indices, reference);
+        return new ContentSeries(times, contents, indices, reference, dry);
     }
 
     private static void requireDifferent(double[] values, Run run) {
@@ -104,6 +107,11 @@ public final class ContentSeries {
 
     public Reference reference() {
         return reference;
+    }
+
+    /** The mass that content is relative to, kg; NaN when the file gave contents. */
+    public double referenceMass() {
+        return referenceMass;
     }
 
     /** Copies a block of times and contents; the models work on blocks so that a million rows need no second copy. */
