@@ -9,6 +9,8 @@ import soakline.specimen.ContentSeries;
 /** From a task to its estimate, by a scan for start values and Levenberg–Marquardt. Stateless. */
 public final class Estimator {
 
+    private static final double ROOT_LAW_FRACTION = 1e-5;
+
     private Estimator() {}
 
     /**
@@ -31,7 +33,7 @@ public final class Estimator {
         if (size <= StartScan.MOST_WEIGHINGS) {
             return refit(task, new StartScan(task, task.data()).best());
         }
-        ContentSeries thinned = thin(task.data());
+        ContentSeries thinned = thinned(task.data());
         EstimationTask small = task.withData(thinned);
         double[] start = new StartScan(small, thinned).best();
         Estimate near = refit(small, start);
@@ -44,6 +46,31 @@ public final class Estimator {
      * @param start all working values; those of fixed parameters are not looked at
      */
     public static Estimate refit(EstimationTask task, double[] start) {
+        if (task.form() != LevelForm.INITIAL_SLOPE || task.isFixed(0)) {
+            return descend(task, start);
+        }
+        // a start on the flat side would never leave it, so the scan gives another
+        Estimate estimate = descend(task, new StartScan(task, thinned(task.data())).best());
+        // the best D may be any small one: the content then follows √t alone, which has no D to descend to
+        double[] rootLaw = start.clone();
+        rootLaw[0] = rootLawDiffusivity(task);
+        Estimate limit = descend(task.withFixed(0, rootLaw[0]), rootLaw);
+        boolean better =
+                limit.isOptimum() && (!estimate.isOptimum() || limit.sumOfSquares() <= estimate.sumOfSquares());
+        return better ? limit : estimate;
+    }
+
+    /** ln of a D so small that content follows the root of time to five digits up to the last weighing. */
+    private static double rootLawDiffusivity(EstimationTask task) {
+        double[] unit = new double[task.shapeCount()];
+        for (int k = 1; k < unit.length; k++) {
+            unit[k] = task.fixedAt(k).orElse(0);
+        }
+        double reached = task.model().initialSlope(unit) * Math.sqrt(task.data().lastTime());
+        return 2 * Math.log(ROOT_LAW_FRACTION / reached);
+    }
+
+    private static Estimate descend(EstimationTask task, double[] start) {
         ContentResiduals residuals = new ContentResiduals(task);
         LevenbergMarquardt.Solution solution = LevenbergMarquardt.solve(residuals, task.reduce(start));
         int free = task.free().length;
@@ -72,8 +99,11 @@ public final class Estimator {
     }
 
     /** About 512 weighings: half of them even by number, half crowded towards the start, where a fast coupon does its all. */
-    private static ContentSeries thin(ContentSeries data) {
+    private static ContentSeries thinned(ContentSeries data) {
         int n = data.size();
+        if (n <= StartScan.MOST_WEIGHINGS) {
+            return data;
+        }
         int half = StartScan.MOST_WEIGHINGS / 2;
         int[] picks = new int[2 * half];
         for (int k = 0; k < half; k++) {

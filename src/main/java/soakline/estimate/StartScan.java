@@ -12,6 +12,8 @@ final class StartScan {
     /** More weighings than this are thinned for the scan only. */
     static final int MOST_WEIGHINGS = 512;
 
+    private static final int PARTS = 8;
+
     private final EstimationTask task;
     private final double[] times;
     private final double[] contents;
@@ -45,14 +47,31 @@ final class StartScan {
             }
         }
         double[] g = new double[times.length];
+        double[] previous = null;
         for (double[] candidate : model.starts(first, last)) {
             for (int k = 0; k < candidate.length; k++) {
                 candidate[k] = task.fixedAt(k).orElse(candidate[k]);
             }
+            if (task.form() == LevelForm.INITIAL_SLOPE && previous != null) {
+                considerBetween(previous, candidate, g);
+            }
             model.evaluate(times, times.length, candidate, g, null);
             consider(candidate, g);
+            previous = candidate;
         }
         return best;
+    }
+
+    /** With the slope in the place of the level the basin begins abruptly, where the curve leaves the √t law. */
+    private void considerBetween(double[] from, double[] to, double[] g) {
+        for (int part = 1; part < PARTS; part++) {
+            double[] candidate = new double[from.length];
+            for (int k = 0; k < candidate.length; k++) {
+                candidate[k] = from[k] + (to[k] - from[k]) * part / PARTS;
+            }
+            task.model().evaluate(times, times.length, candidate, g, null);
+            consider(candidate, g);
+        }
     }
 
     private void consider(double[] shape, double[] g) {
@@ -74,6 +93,10 @@ final class StartScan {
             by += b * y;
             yy += y * y;
         }
+        if (task.form() == LevelForm.INITIAL_SLOPE && task.isFixed(task.levelIndex())) {
+            considerHeldSlope(shape, g);
+            return;
+        }
         boolean startFixed = task.isFixed(task.startIndex());
         boolean levelFixed = task.form() == LevelForm.EQUILIBRIUM && task.isFixed(task.levelIndex());
         double start = startFixed ? task.fixedAt(task.startIndex()).getAsDouble() - shift : 0;
@@ -91,14 +114,38 @@ final class StartScan {
         }
         double sum =
                 yy - 2 * (start * ay + level * by) + start * start * aa + 2 * start * level * ab + level * level * bb;
+        double held = task.form() == LevelForm.EQUILIBRIUM
+                ? level + shift
+                : (level - start) * task.model().initialSlope(shape);
+        keepIfBest(sum, shape, start + shift, held);
+    }
+
+    /** With the initial slope held, the rise follows from the shape and only the start content is left to solve for. */
+    private void considerHeldSlope(double[] shape, double[] g) {
+        double slope = task.fixedAt(task.levelIndex()).getAsDouble();
+        double rise = slope / task.model().initialSlope(shape);
+        double mean = 0;
+        for (int i = 0; i < g.length; i++) {
+            mean += (contents[i] - rise * g[i]) / g.length;
+        }
+        double start = task.isFixed(task.startIndex())
+                ? task.fixedAt(task.startIndex()).getAsDouble() - shift
+                : mean;
+        double sum = 0;
+        for (int i = 0; i < g.length; i++) {
+            double residual = contents[i] - start - rise * g[i];
+            sum += residual * residual;
+        }
+        keepIfBest(sum, shape, start + shift, slope);
+    }
+
+    private void keepIfBest(double sum, double[] shape, double start, double level) {
         if (sum < bestSum || best == null) {
             bestSum = sum;
             best = new double[shape.length + 2];
             System.arraycopy(shape, 0, best, 0, shape.length);
-            best[task.startIndex()] = start + shift;
-            best[task.levelIndex()] = task.form() == LevelForm.EQUILIBRIUM
-                    ? level + shift
-                    : (level - start) * task.model().initialSlope(shape);
+            best[task.startIndex()] = start;
+            best[task.levelIndex()] = level;
         }
     }
 }

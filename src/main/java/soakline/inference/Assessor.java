@@ -9,7 +9,9 @@ import java.util.OptionalDouble;
 import soakline.estimate.Estimate;
 import soakline.estimate.EstimationTask;
 import soakline.estimate.Estimator;
+import soakline.estimate.LevelForm;
 import soakline.estimate.LevenbergMarquardt;
+import soakline.estimate.Parameter;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Finding;
@@ -30,11 +32,33 @@ public final class Assessor {
         Sheet sheet = run.sheet();
         EstimationTask task = task(run, sheet, options);
         Estimate estimate = Estimator.estimate(task);
+        Optional<Estimate> rootLaw = rootLaw(task, estimate);
         List<Finding> problems = new ArrayList<>(Plausibility.ofInput(run, task.data(), estimate));
-        if (!estimate.isOptimum()) {
+        if (!estimate.isOptimum() && rootLaw.isEmpty()) {
             return withoutResult(run, estimate, problems);
         }
-        Identifiability identifiability = Identifiability.of(estimate);
+        Identifiability identifiability =
+                rootLaw.isPresent() ? Identifiability.ofRootLaw() : Identifiability.of(estimate);
+        return judge(run, options, rootLaw.orElse(estimate), identifiability, problems);
+    }
+
+    /** Where the best fit is the √t law itself, which has no D: the fit of the initial slope in its place. */
+    private static Optional<Estimate> rootLaw(EstimationTask task, Estimate estimate) {
+        if (estimate.isOptimum() || task.isFixed(0) || task.isFixed(task.levelIndex())) {
+            return Optional.empty();
+        }
+        Estimate slope = Estimator.estimate(task.withInitialSlope());
+        boolean asGood = slope.isOptimum() && slope.sumOfSquares() <= estimate.sumOfSquares() * (1 + 1e-6);
+        return asGood ? Optional.of(slope) : Optional.empty();
+    }
+
+    private static Assessment judge(
+            Run run,
+            AssessmentOptions options,
+            Estimate estimate,
+            Identifiability identifiability,
+            List<Finding> problems) {
+        EstimationTask task = estimate.task();
         boolean determined = identifiability.isDetermined();
         identifiability.refusal().ifPresent(problems::add);
         if (determined) {
@@ -54,7 +78,7 @@ public final class Assessor {
                 direction,
                 determined ? parameters(estimate, options) : parametersOfShortTest(estimate, options),
                 determined && !task.isFixed(0)
-                        ? Optional.of(UncertaintyBudget.of(estimate, sheet, options.level()))
+                        ? Optional.of(UncertaintyBudget.of(estimate, run.sheet(), options.level()))
                         : Optional.empty(),
                 checks,
                 shape.shortTimeLine(),
@@ -127,29 +151,23 @@ public final class Assessor {
         EstimationTask task = estimate.task();
         List<ParameterResult> results = new ArrayList<>();
         for (int i = 0; i < task.shapeCount(); i++) {
-            results.add(withoutValue(task, i));
+            results.add(withoutValue(task.parameters().get(i)));
         }
-        results.add(withoutValue(task, task.levelIndex()));
+        results.add(withoutValue(Parameter.EQUILIBRIUM_CONTENT));
         results.add(result(estimate, task.startIndex(), options));
-        if (!task.isFixed(task.levelIndex())) {
+        if (task.form() == LevelForm.INITIAL_SLOPE) {
+            results.add(result(estimate, task.levelIndex(), options));
+        } else if (!task.isFixed(task.levelIndex())) {
             EstimationTask slopeTask = task.withInitialSlope();
             double[] start = estimate.working();
             start[task.levelIndex()] = estimate.rise() * estimate.model().initialSlope(estimate.shape());
-            Estimate slope = Estimator.refit(slopeTask, start);
-            if (slope.isOptimum()) {
-                results.add(result(slope, slopeTask.levelIndex(), options));
-            }
+            results.add(result(Estimator.refit(slopeTask, start), slopeTask.levelIndex(), options));
         }
         return results;
     }
 
-    private static ParameterResult withoutValue(EstimationTask task, int parameter) {
-        return new ParameterResult(
-                task.parameters().get(parameter),
-                OptionalDouble.empty(),
-                OptionalDouble.empty(),
-                task.isFixed(parameter),
-                Optional.empty());
+    private static ParameterResult withoutValue(Parameter parameter) {
+        return new ParameterResult(parameter, OptionalDouble.empty(), OptionalDouble.empty(), false, Optional.empty());
     }
 
     /** The fit itself failed: every parameter without a value, every check without a verdict. */
@@ -161,10 +179,10 @@ public final class Assessor {
         EstimationTask task = estimate.task();
         List<ParameterResult> results = new ArrayList<>();
         for (int i = 0; i < task.shapeCount(); i++) {
-            results.add(withoutValue(task, i));
+            results.add(withoutValue(task.parameters().get(i)));
         }
-        results.add(withoutValue(task, task.levelIndex()));
-        results.add(withoutValue(task, task.startIndex()));
+        results.add(withoutValue(Parameter.EQUILIBRIUM_CONTENT));
+        results.add(withoutValue(Parameter.START_CONTENT));
         List<Check> checks = new ArrayList<>();
         for (CheckName name : CheckName.values()) {
             checks.add(Check.unknown(name, Finding.of(Code.CHECK_UNKNOWN, "there is no fitted curve")));

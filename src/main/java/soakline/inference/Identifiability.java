@@ -1,5 +1,6 @@
 package soakline.inference;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -22,6 +23,7 @@ import soakline.problem.Finding;
 record Identifiability(Optional<Interval> interval, OptionalDouble correlation, Optional<Finding> refusal) {
 
     private static final double LEVEL = 0.95;
+    private static final int LEVEL_PERCENT = 95;
     private static final double WIDEST = 1.5;
     private static final double STRONGEST = -0.99;
 
@@ -41,17 +43,25 @@ record Identifiability(Optional<Interval> interval, OptionalDouble correlation, 
         return new Identifiability(Optional.of(interval), correlation, refusal(interval, correlation));
     }
 
+    /** The best fit is the √t law, whatever D: open below. */
+    static Identifiability ofRootLaw() {
+        return new Identifiability(
+                Optional.empty(),
+                OptionalDouble.empty(),
+                Optional.of(Finding.of(Code.NOT_DETERMINED_OPEN, LEVEL_PERCENT, "lower")));
+    }
+
     private static Optional<Finding> refusal(Interval interval, OptionalDouble correlation) {
         if (interval.isOpen()) {
             if (interval.low().isPresent()) {
-                return Optional.of(Finding.of(Code.NOT_DETERMINED_FAST, 95));
+                return Optional.of(Finding.of(Code.NOT_DETERMINED_FAST, LEVEL_PERCENT));
             }
             String side = interval.high().isEmpty() ? "lower or upper" : "lower";
-            return Optional.of(Finding.of(Code.NOT_DETERMINED_OPEN, 95, side));
+            return Optional.of(Finding.of(Code.NOT_DETERMINED_OPEN, LEVEL_PERCENT, side));
         }
         double ratio = interval.high().getAsDouble() / interval.low().getAsDouble();
         if (ratio > WIDEST && correlation.orElse(0) < STRONGEST) {
-            return Optional.of(Finding.of(Code.NOT_DETERMINED_WIDE, 95, ratio, correlation.getAsDouble()));
+            return Optional.of(Finding.of(Code.NOT_DETERMINED_WIDE, LEVEL_PERCENT, ratio, correlation.getAsDouble()));
         }
         return Optional.empty();
     }
@@ -69,13 +79,11 @@ record Identifiability(Optional<Interval> interval, OptionalDouble correlation, 
             case CAUTION -> Finding.of(Code.PLATEAU_SHORT, reached);
             default -> Finding.of(Code.PLATEAU_PASS, reached);
         };
-        List<Check.Figure> figures = correlation.isPresent() && isDetermined()
-                ? List.of(
-                        new Check.Figure("lastFraction", reached),
-                        new Check.Figure("correlation", correlation.getAsDouble()))
-                : correlation.isPresent()
-                        ? List.of(new Check.Figure("correlation", correlation.getAsDouble()))
-                        : List.of(new Check.Figure("lastFraction", reached));
+        List<Check.Figure> figures = new ArrayList<>();
+        if (isDetermined()) {
+            figures.add(new Check.Figure("lastFraction", reached));
+        }
+        correlation.ifPresent(c -> figures.add(new Check.Figure("correlation", c)));
         return new Check(
                 CheckName.PLATEAU,
                 verdict,
