@@ -19,6 +19,7 @@ import soakline.problem.Place;
 final class CsvTable implements Table {
 
     private static final int SAMPLE = 1 << 15;
+    private static final int BUFFER = 1 << 16;
 
     private final GuardedReader guard;
     private final Place place;
@@ -34,7 +35,7 @@ final class CsvTable implements Table {
     CsvTable(Reader text, Place place) throws IOException {
         this.place = place;
         guard = new GuardedReader(text, place);
-        BufferedReader lines = new BufferedReader(guard);
+        BufferedReader lines = new BufferedReader(guard, BUFFER);
         readFacts(lines);
         dialect = Dialect.of(sample(lines));
         end = linesAbove;

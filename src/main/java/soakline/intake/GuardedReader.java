@@ -7,7 +7,7 @@ import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Place;
 
-/** Stops at a line or a row too long for a table, before it fills the memory. */
+/** Stops at what no table of weighings holds: a zero character, and a line or a row that would fill the memory. */
 final class GuardedReader extends FilterReader {
 
     /** Characters in a line; a thousand columns need about a tenth of it. */
@@ -18,7 +18,8 @@ final class GuardedReader extends FilterReader {
 
     private final Place place;
     private int line = 1;
-    private int length;
+    private long position;
+    private long lineStart;
     private char last;
     private int sinceRow;
     private int rowLine;
@@ -45,18 +46,34 @@ final class GuardedReader extends FilterReader {
         int n = super.read(target, offset, count);
         for (int i = offset; i < offset + n; i++) {
             char c = target[i];
-            if (c == '\n' || c == '\r') {
-                line += c == '\n' && last == '\r' ? 0 : 1;
-                length = 0;
-            } else if (++length > LONGEST_LINE) {
-                throw Fault.of(Code.LINE_TOO_LONG, LONGEST_LINE).at(place.line(line));
+            if (c <= '\r') {
+                control(c, position + i - offset);
             }
             last = c;
         }
+        position += Math.max(0, n);
+        requireShort(position);
         sinceRow += Math.max(0, n);
         if (sinceRow > LONGEST_ROW) {
             throw Fault.of(Code.QUOTES_NOT_CLOSED).at(place.line(rowLine + 1));
         }
         return n;
+    }
+
+    private void control(char c, long at) {
+        if (c == 0) {
+            throw Fault.of(Code.FILE_BINARY, at + 1).at(place);
+        }
+        if (c == '\n' || c == '\r') {
+            requireShort(at);
+            line += c == '\n' && last == '\r' ? 0 : 1;
+            lineStart = at + 1;
+        }
+    }
+
+    private void requireShort(long end) {
+        if (end - lineStart > LONGEST_LINE) {
+            throw Fault.of(Code.LINE_TOO_LONG, LONGEST_LINE).at(place.line(line));
+        }
     }
 }

@@ -88,7 +88,9 @@ final class RowStore {
     }
 
     Optional<String> reason(int coupon, int row) {
-        return Optional.ofNullable(reasons.get(coupon).get(row));
+        Map<Integer, String> ofCoupon = reasons.get(coupon);
+        // most runs set nothing aside, and a million look-ups would take longer than the sorting
+        return ofCoupon.isEmpty() ? Optional.empty() : Optional.ofNullable(ofCoupon.get(row));
     }
 
     /** How often a row is earlier than the one above it. */

@@ -49,7 +49,8 @@ public final class RunFileReader {
                     return new RunTable(table, place, options).runs();
                 }
             }
-            return read(TextSource.open(in, Files.size(file), progress, place), place, options);
+            InputStream watched = new WatchedInput(in, Files.size(file), progress);
+            return read(TextSource.open(watched), place, options);
         } catch (NoSuchFileException e) {
             throw Fault.of(Code.FILE_NOT_FOUND).at(place);
         } catch (IOException e) {
@@ -66,10 +67,6 @@ public final class RunFileReader {
      */
     public static List<Run> readText(String name, String text, ReadOptions options) {
         Place place = Place.of(name);
-        int zero = text.indexOf('\0');
-        if (zero >= 0) {
-            throw Fault.of(Code.FILE_BINARY, zero).at(place);
-        }
         try {
             return read(new StringReader(text), place, options);
         } catch (IOException e) {

@@ -5,10 +5,8 @@ import java.io.InputStream;
 import java.io.InputStreamReader;
 import java.io.PushbackInputStream;
 import java.io.Reader;
-import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
-import soakline.problem.Place;
 
 /** Bytes to characters: finds the encoding from a byte order mark or from the look of the first bytes. */
 final class TextSource {
@@ -20,29 +18,19 @@ final class TextSource {
 
     private TextSource() {}
 
-    /**
-     * UTF-16 with a mark or plainly so, else UTF-8 with Windows-1252 for what is not; the mark is left out.
-     *
-     * @param size in bytes, for the progress; 0 when not known
-     */
-    static Reader open(InputStream raw, long size, Progress progress, Place place) throws IOException {
+    /** UTF-16 with a mark or plainly so, else UTF-8 with Windows-1252 for what is not; the mark is left out. */
+    static Reader open(InputStream raw) throws IOException {
         PushbackInputStream in = new PushbackInputStream(raw, LOOK);
         byte[] first = in.readNBytes(LOOK);
         int skip = markLength(first);
         in.unread(first, skip, first.length - skip);
-        WatchedInput watched = new WatchedInput(in, size, progress, place);
         if (startsWith(first, LITTLE_ENDIAN_MARK) || (skip == 0 && zerosStandAt(1, first))) {
-            return utf16(watched, StandardCharsets.UTF_16LE);
+            return new InputStreamReader(in, StandardCharsets.UTF_16LE);
         }
         if (startsWith(first, BIG_ENDIAN_MARK) || (skip == 0 && zerosStandAt(0, first))) {
-            return utf16(watched, StandardCharsets.UTF_16BE);
+            return new InputStreamReader(in, StandardCharsets.UTF_16BE);
         }
-        return new Utf8OrLatinReader(watched);
-    }
-
-    private static Reader utf16(WatchedInput in, Charset charset) {
-        in.allowZeros();
-        return new InputStreamReader(in, charset);
+        return new Utf8OrLatinReader(in);
     }
 
     private static int markLength(byte[] first) {

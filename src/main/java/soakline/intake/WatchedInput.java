@@ -3,32 +3,21 @@ package soakline.intake;
 import java.io.FilterInputStream;
 import java.io.IOException;
 import java.io.InputStream;
-import soakline.problem.Code;
-import soakline.problem.Fault;
-import soakline.problem.Place;
 
-/** Reports progress, and stops at the first zero byte, which no text of single bytes has. */
+/** Reports how much of a file has been read. */
 final class WatchedInput extends FilterInputStream {
 
     private final long size;
     private final Progress progress;
-    private final Place place;
-    private boolean zerosAllowed;
     private long count;
 
     /**
-     * @param size of the whole input in bytes, 0 when not known
+     * @param size of the whole input in bytes
      */
-    WatchedInput(InputStream in, long size, Progress progress, Place place) {
+    WatchedInput(InputStream in, long size, Progress progress) {
         super(in);
         this.size = size;
         this.progress = progress;
-        this.place = place;
-    }
-
-    /** For text of two bytes a character. */
-    void allowZeros() {
-        zerosAllowed = true;
     }
 
     @Override
@@ -40,14 +29,9 @@ final class WatchedInput extends FilterInputStream {
     @Override
     public int read(byte[] target, int offset, int length) throws IOException {
         int n = super.read(target, offset, length);
-        for (int i = 0; !zerosAllowed && i < n; i++) {
-            if (target[offset + i] == 0) {
-                throw Fault.of(Code.FILE_BINARY, count + i).at(place);
-            }
-        }
         if (n > 0) {
             count += n;
-            progress.done(size > 0 ? Math.min(1, count / (double) size) : 0);
+            progress.done(Math.min(1, count / (double) size));
         }
         return n;
     }
