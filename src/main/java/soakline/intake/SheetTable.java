@@ -1,7 +1,9 @@
 package soakline.intake;
 
+import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
+import java.io.UncheckedIOException;
 import java.time.LocalDateTime;
 import java.time.LocalTime;
 import java.time.format.DateTimeFormatter;
@@ -52,7 +54,7 @@ final class SheetTable implements Table {
     SheetTable(InputStream in, Progress progress, Place place) throws IOException {
         this.progress = progress;
         this.place = place;
-        workbook = guarded(() -> open(in));
+        workbook = open(in.readAllBytes());
         boolean from1904 = guarded(workbook::isDate1904);
         dayZero = from1904 ? LocalDateTime.of(1904, 1, 1, 0, 0) : LocalDateTime.of(1899, 12, 30, 0, 0);
         stream = guarded(this::openFirstSheet);
@@ -60,11 +62,20 @@ final class SheetTable implements Table {
         readFacts();
     }
 
-    private ReadableWorkbook open(InputStream in) {
+    /** A workbook without styles is refused by the library when asked for them. */
+    private ReadableWorkbook open(byte[] bytes) {
         try {
-            return new ReadableWorkbook(in, new ReadingOptions(true, true));
+            return open(bytes, true);
+        } catch (RuntimeException e) {
+            return guarded(() -> open(bytes, false));
+        }
+    }
+
+    private static ReadableWorkbook open(byte[] bytes, boolean withFormats) {
+        try {
+            return new ReadableWorkbook(new ByteArrayInputStream(bytes), new ReadingOptions(withFormats, true));
         } catch (IOException e) {
-            throw new IllegalStateException(e.getMessage(), e);
+            throw new UncheckedIOException(e);
         }
     }
 
@@ -72,7 +83,7 @@ final class SheetTable implements Table {
         try {
             return workbook.getFirstSheet().openStream();
         } catch (IOException e) {
-            throw new IllegalStateException(e.getMessage(), e);
+            throw new UncheckedIOException(e);
         }
     }
 
@@ -172,7 +183,7 @@ final class SheetTable implements Table {
         if (days < 1) {
             return LocalTime.MIDNIGHT.plusNanos(millis * 1_000_000).toString();
         }
-        LocalDateTime moment = dayZero.plusNanos(0).plusSeconds(millis / 1000).plusNanos(millis % 1000 * 1_000_000);
+        LocalDateTime moment = dayZero.plusSeconds(millis / 1000).plusNanos(millis % 1000 * 1_000_000);
         boolean wholeDay = millis % 86_400_000 == 0;
         return wholeDay ? moment.toLocalDate().toString() : DateTimeFormatter.ISO_LOCAL_DATE_TIME.format(moment);
     }

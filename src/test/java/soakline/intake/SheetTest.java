@@ -98,6 +98,17 @@ class SheetTest {
     }
 
     @Test
+    void aWorkbookWithoutStylesIsRead() throws IOException {
+        Run run = read(new Workbooks()
+                .withoutStyles()
+                .row("time [h]", "mass [g]")
+                .row(0, 1.5)
+                .row(1, 2)
+                .bytes());
+        assertThat(Reading.times(run)).containsExactly(0, 3600);
+    }
+
+    @Test
     void aDamagedOrEmptyWorkbookIsAFault() throws IOException {
         byte[] whole = new Workbooks().row("time [h]", "mass [g]").row(0, 1).bytes();
         assertThat(fault(Arrays.copyOf(whole, whole.length / 2))).isEqualTo(Code.SHEET_NOT_READABLE);

@@ -22,10 +22,16 @@ final class Workbooks {
 
     private final StringBuilder rows = new StringBuilder();
     private boolean from1904;
+    private boolean styled = true;
     private int row;
 
     Workbooks from1904() {
         from1904 = true;
+        return this;
+    }
+
+    Workbooks withoutStyles() {
+        styled = false;
         return this;
     }
 
@@ -66,7 +72,7 @@ final class Workbooks {
                     "<Types xmlns=\"" + PACKAGE
                             + "content-types\"><Default Extension=\"xml\" ContentType=\"application/xml\"/>"
                             + part.formatted("/xl/workbook.xml", "sheet.main")
-                            + part.formatted("/xl/styles.xml", "styles")
+                            + (styled ? part.formatted("/xl/styles.xml", "styles") : "")
                             + part.formatted("/xl/worksheets/sheet1.xml", "worksheet") + "</Types>");
             put(
                     zip,
