@@ -1,7 +1,6 @@
 package soakline.intake;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -10,33 +9,39 @@ import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Place;
 
-/** The rows of a table in the order of the file, in arrays: a time, a line and a value a coupon (NaN where there is none). */
+/**
+ * The rows of a table, first as they come and then in order of time: a time, a line and a value a coupon (NaN where there is
+ * none). Kept in blocks, which need no copying to grow.
+ */
 final class RowStore {
 
     /** Eight months of a log that weighs every second, and well within the memory of a desktop. */
     static final int MOST_ROWS = 20_000_000;
 
-    private static final int FIRST_CAPACITY = 1024;
+    private static final int BLOCK_BITS = 14;
+    private static final int BLOCK_ROWS = 1 << BLOCK_BITS;
 
+    private final int coupons;
     private final int mostRows;
     private final Place place;
-    private double[] times = new double[FIRST_CAPACITY];
-    private int[] lines = new int[FIRST_CAPACITY];
-    private final double[][] values;
+    private final List<Block> blocks = new ArrayList<>();
     private final List<Map<Integer, String>> reasons = new ArrayList<>();
     private int size;
+    private int stepsBack;
+    /** Row of the file at each place in order of time; empty while both are the same. */
+    private int[] order = {};
 
     RowStore(int coupons, int mostRows, Place place) {
+        this.coupons = coupons;
         this.mostRows = mostRows;
         this.place = place;
-        values = new double[coupons][FIRST_CAPACITY];
         for (int c = 0; c < coupons; c++) {
             reasons.add(new HashMap<>());
         }
     }
 
     /**
-     * Adds a row, as yet without values.
+     * Adds a row; its values are to be set next, all of them.
      *
      * @throws Fault when there are more than can be kept
      */
@@ -44,25 +49,19 @@ final class RowStore {
         if (size == mostRows) {
             throw Fault.of(Code.TOO_LARGE, mostRows).at(place.line(line));
         }
-        if (size == times.length) {
-            int capacity = Math.min(mostRows, size * 2);
-            times = Arrays.copyOf(times, capacity);
-            lines = Arrays.copyOf(lines, capacity);
-            for (int c = 0; c < values.length; c++) {
-                values[c] = Arrays.copyOf(values[c], capacity);
-            }
+        if (size % BLOCK_ROWS == 0) {
+            blocks.add(new Block(coupons));
         }
-        times[size] = time;
-        lines[size] = line;
-        for (double[] ofCoupon : values) {
-            ofCoupon[size] = Double.NaN;
-        }
+        stepsBack += size > 0 && time < time(size - 1) ? 1 : 0;
+        Block block = blocks.get(size >> BLOCK_BITS);
+        block.times[size % BLOCK_ROWS] = time;
+        block.lines[size % BLOCK_ROWS] = line;
         size++;
     }
 
-    /** Sets the value of a coupon in the last row. */
+    /** Sets the value of a coupon in the last row, NaN when it has none. */
     void setValue(int coupon, double value) {
-        values[coupon][size - 1] = value;
+        blocks.get((size - 1) >> BLOCK_BITS).values[coupon][(size - 1) % BLOCK_ROWS] = value;
     }
 
     /** Sets the last row aside for a coupon. */
@@ -74,17 +73,23 @@ final class RowStore {
         return size;
     }
 
+    /** How often a row of the file is earlier than the one above it. */
+    int stepsBack() {
+        return stepsBack;
+    }
+
+    /** Time of a row of the file. */
     double time(int row) {
-        return times[row];
+        return blocks.get(row >> BLOCK_BITS).times[row % BLOCK_ROWS];
     }
 
     int line(int row) {
-        return lines[row];
+        return blocks.get(row >> BLOCK_BITS).lines[row % BLOCK_ROWS];
     }
 
     /** NaN where there is none. */
     double value(int coupon, int row) {
-        return values[coupon][row];
+        return blocks.get(row >> BLOCK_BITS).values[coupon][row % BLOCK_ROWS];
     }
 
     Optional<String> reason(int coupon, int row) {
@@ -93,26 +98,22 @@ final class RowStore {
         return ofCoupon.isEmpty() ? Optional.empty() : Optional.ofNullable(ofCoupon.get(row));
     }
 
-    /** How often a row is earlier than the one above it. */
-    int stepsBack() {
-        int steps = 0;
-        for (int row = 1; row < size; row++) {
-            steps += times[row] < times[row - 1] ? 1 : 0;
-        }
-        return steps;
+    /** Row of the file that comes at a place in order of time, once {@link #sort} was called. */
+    int inOrder(int index) {
+        return order.length == 0 ? index : order[index];
     }
 
-    /** Rows in order of time; those of the same time as they stand in the file. */
-    int[] inOrder() {
-        int[] order = new int[size];
+    /** Finds the order of time; rows of the same time stay as they stand in the file. */
+    void sort() {
+        if (stepsBack == 0) {
+            return;
+        }
+        order = new int[size];
         for (int row = 0; row < size; row++) {
             order[row] = row;
         }
-        if (stepsBack() == 0) {
-            return order;
-        }
         int[] merged = new int[size];
-        for (int width = 1; width > 0 && width < size; width *= 2) {
+        for (int width = 1; width < size; width *= 2) {
             for (int from = 0; from < size; from += 2 * width) {
                 merge(order, merged, from, Math.min(from + width, size), Math.min(from + 2 * width, size));
             }
@@ -120,15 +121,24 @@ final class RowStore {
             order = merged;
             merged = swap;
         }
-        return order;
     }
 
     private void merge(int[] from, int[] to, int start, int middle, int end) {
         int left = start;
         int right = middle;
         for (int k = start; k < end; k++) {
-            boolean takeLeft = left < middle && (right >= end || times[from[left]] <= times[from[right]]);
+            boolean takeLeft = left < middle && (right >= end || time(from[left]) <= time(from[right]));
             to[k] = takeLeft ? from[left++] : from[right++];
+        }
+    }
+
+    private static final class Block {
+        private final double[] times = new double[BLOCK_ROWS];
+        private final int[] lines = new int[BLOCK_ROWS];
+        private final double[][] values;
+
+        Block(int coupons) {
+            values = new double[coupons][BLOCK_ROWS];
         }
     }
 }

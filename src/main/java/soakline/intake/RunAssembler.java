@@ -40,7 +40,7 @@ final class RunAssembler {
      */
     List<Run> runs(List<FactLine> lines, NoteBook fileNotes, NoteBook[] couponNotes) {
         noteOrder(fileNotes);
-        int[] order = store.inOrder();
+        store.sort();
         List<String> coupons = header.values().stream().map(Column::coupon).toList();
         FactReader reader = new FactReader(lines, coupons, place);
         List<Run> runs = new ArrayList<>();
@@ -49,8 +49,8 @@ final class RunAssembler {
             notes.addAll(fileNotes);
             Facts facts = reader.facts(coupons.get(c), notes);
             ValueKind kind = header.values().get(c).dimension() == Dimension.MASS ? ValueKind.MASS : ValueKind.CONTENT;
-            double zero = zero(c, order, reader.exposedFrom(coupons.get(c)));
-            Weighings weighings = weighings(c, order, zero, kind, notes);
+            double zero = zero(c, reader.exposedFrom(coupons.get(c)));
+            Weighings weighings = weighings(c, zero, kind, notes);
             runs.add(new Run(place.source(), facts, kind, weighings, notes.notes()));
         }
         return runs;
@@ -74,9 +74,10 @@ final class RunAssembler {
     }
 
     /** Stated, or the first weighing of the coupon among date-times, or the zero of the elapsed times. */
-    private double zero(int coupon, int[] order, Optional<FactLine> exposedFrom) {
+    private double zero(int coupon, Optional<FactLine> exposedFrom) {
         double first = 0;
-        for (int row : order) {
+        for (int k = 0; k < store.size(); k++) {
+            int row = store.inOrder(k);
             if (!Double.isNaN(store.value(coupon, row))) {
                 first = store.time(row);
                 break;
@@ -88,13 +89,14 @@ final class RunAssembler {
         return times.hasNoZero() ? first : 0;
     }
 
-    private Weighings weighings(int coupon, int[] order, double zero, ValueKind kind, NoteBook notes) {
-        Weighings.Builder builder = new Weighings.Builder();
+    private Weighings weighings(int coupon, double zero, ValueKind kind, NoteBook notes) {
+        Weighings.Builder builder = new Weighings.Builder(store.size());
         int column = header.values().get(coupon).index() + 1;
         int before = 0;
         int repeated = 0;
         double last = Double.NaN;
-        for (int row : order) {
+        for (int k = 0; k < store.size(); k++) {
+            int row = store.inOrder(k);
             double value = store.value(coupon, row);
             if (Double.isNaN(value)) {
                 continue;
