@@ -114,10 +114,6 @@ record Column(int index, Role role, String title, String coupon, String unitText
         return new Column(index, Role.TIME, title, "", unitText, Dimension.TIME);
     }
 
-    Column withUnitText(String value) {
-        return new Column(index, role, title, coupon, value, dimension);
-    }
-
     Column withCoupon(String value) {
         return new Column(index, role, title, value, unitText, dimension);
     }

@@ -3,7 +3,6 @@ package soakline.intake;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.IntFunction;
 import soakline.intake.Column.Role;
 import soakline.problem.Code;
 import soakline.problem.Fault;
@@ -89,30 +88,22 @@ record Header(Column time, Optional<Column> clock, List<Column> values, List<Col
         return List.copyOf(result);
     }
 
-    /** Whether a row below the titles holds units: at least one, and no number where a number would stand. */
-    boolean isUnitsRow(IntFunction<String> row) {
-        boolean found = isUnitOf(time, row);
-        for (Column value : values) {
-            if (Numbers.parse(row.apply(value.index())).isPresent()) {
-                return false;
-            }
-            found |= isUnitOf(value, row);
+    /** Whether a row below the titles holds units: at least one, and no number. */
+    static boolean isUnitsRow(List<String> cells) {
+        return cells.stream().anyMatch(c -> Unit.find(bare(c)).isPresent())
+                && cells.stream().noneMatch(c -> Numbers.parse(c).isPresent());
+    }
+
+    /** The titles with the units of the row below them, where they have none of their own. */
+    static List<String> withUnits(List<String> titles, List<String> units) {
+        List<String> result = new ArrayList<>();
+        for (int i = 0; i < titles.size(); i++) {
+            String unit = i < units.size() ? bare(units.get(i)) : "";
+            boolean complete =
+                    unit.isEmpty() || !Column.of(i, titles.get(i)).unitText().isEmpty();
+            result.add(complete ? titles.get(i) : titles.get(i) + " [" + unit + "]");
         }
-        return found && Numbers.parse(row.apply(time.index())).isEmpty();
-    }
-
-    private static boolean isUnitOf(Column column, IntFunction<String> row) {
-        return Unit.find(bare(row.apply(column.index())), column.dimension()).isPresent();
-    }
-
-    /** The header with the units of a row below it, where the titles have none. */
-    Header withUnits(IntFunction<String> row) {
-        List<Column> withUnits = values.stream().map(c -> withUnit(c, row)).toList();
-        return new Header(withUnit(time, row), clock, withUnits, setAside, size);
-    }
-
-    private static Column withUnit(Column column, IntFunction<String> row) {
-        return column.unitText().isEmpty() ? column.withUnitText(bare(row.apply(column.index()))) : column;
+        return result;
     }
 
     private static String bare(String unit) {

@@ -70,18 +70,23 @@ final class RunTable {
     /** The first row is the header; units may stand below it. Returns whether a row of data is next. */
     private boolean columnsFromRow() throws IOException {
         Place headerPlace = place.line(table.line());
-        List<String> titles = new ArrayList<>();
-        for (int i = 0; i < table.size(); i++) {
-            titles.add(table.cell(i));
-        }
-        header = Header.of(titles, headerPlace);
+        List<String> titles = cells();
         boolean more = nextFilled();
-        if (more && header.isUnitsRow(table::cell)) {
-            header = header.withUnits(table::cell);
+        if (more && Header.isUnitsRow(cells())) {
+            titles = Header.withUnits(titles, cells());
             more = nextFilled();
         }
+        header = Header.of(titles, headerPlace);
         prepare(headerPlace);
         return more;
+    }
+
+    private List<String> cells() {
+        List<String> cells = new ArrayList<>();
+        for (int i = 0; i < table.size(); i++) {
+            cells.add(table.cell(i));
+        }
+        return cells;
     }
 
     /** The user names the columns; titles and units of the file's own, which hold no weighing, are passed over. */

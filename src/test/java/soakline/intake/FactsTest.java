@@ -156,6 +156,9 @@ class FactsTest {
         assertThat(Reading.all("# A1 specimen: Q\ntime [h],A1_mass [g],A2 [g]\n" + rows))
                 .extracting(Run::name)
                 .containsExactly("Q", "A2");
+        assertThat(Reading.all("time,A1,A2,RH\nh,g,mg,%\n" + rows))
+                .extracting(Run::name)
+                .containsExactly("A1", "A2");
         assertThat(Reading.all("time [h],mass [g],mass [g]\n" + rows))
                 .extracting(Run::name)
                 .containsExactly("column 2", "column 3");
