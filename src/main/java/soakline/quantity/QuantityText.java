@@ -9,31 +9,51 @@ public final class QuantityText {
     private QuantityText() {}
 
     /**
-     * Reads a number with its unit and, behind {@code ±}, {@code +/-} or {@code +-}, its standard uncertainty (whose unit may
-     * be left out when it is the same).
+     * Reads a number with its unit and, behind {@code ±}, {@code +/-} or {@code +-}, its standard uncertainty. A unit that
+     * stands only once counts for both: {@code 2.03 mm ± 0.01}, {@code 2.03 ± 0.01 mm}.
      *
      * @throws QuantityFormatException when the text is not such a quantity, or its unit is of another dimension
      */
     public static Quantity parse(String text, Dimension dimension) throws QuantityFormatException {
-        String whole = text.strip().replace("+/-", "±").replace("+-", "±");
+        String whole = spaced(text).strip().replace("+/-", "±").replace("+-", "±");
         if (whole.isEmpty()) {
             throw new QuantityFormatException(Reason.EMPTY, text);
         }
         int sign = whole.indexOf('±');
-        String valueText = sign < 0 ? whole : whole.substring(0, sign);
-        Parsed value = split(valueText);
-        Unit unit = unit(value, dimension);
-        double si = unit.toSi(value.number);
+        Parsed value = split(sign < 0 ? whole : whole.substring(0, sign));
         if (sign < 0) {
-            return new Quantity(si, OptionalDouble.empty(), unit);
+            Unit unit = unit(value, dimension);
+            return new Quantity(finite(unit.toSi(value.number), whole), OptionalDouble.empty(), unit);
         }
         Parsed uncertainty = split(whole.substring(sign + 1));
+        Unit unit = unit(value.unit.isEmpty() ? uncertainty : value, dimension);
         Unit uncertaintyUnit = uncertainty.unit.isEmpty() ? unit : unit(uncertainty, dimension);
         if (!(uncertainty.number >= 0)) {
             throw new QuantityFormatException(
                     Reason.UNCERTAINTY_BAD, whole.substring(sign + 1).strip());
         }
-        return new Quantity(si, OptionalDouble.of(uncertaintyUnit.differenceToSi(uncertainty.number)), unit);
+        double si = finite(unit.toSi(value.number), whole);
+        double siUncertainty = finite(uncertaintyUnit.differenceToSi(uncertainty.number), whole);
+        return new Quantity(si, OptionalDouble.of(siUncertainty), unit);
+    }
+
+    /** No-break and thin spaces as plain ones. */
+    private static String spaced(String text) {
+        StringBuilder s = new StringBuilder(text);
+        for (int i = 0; i < s.length(); i++) {
+            if (Numbers.isSpace(s.charAt(i))) {
+                s.setCharAt(i, ' ');
+            }
+        }
+        return s.toString();
+    }
+
+    /** A unit can carry a number beyond the doubles. */
+    private static double finite(double si, String text) throws QuantityFormatException {
+        if (!Double.isFinite(si)) {
+            throw new QuantityFormatException(Reason.NOT_FINITE, text);
+        }
+        return si;
     }
 
     private static Unit unit(Parsed parsed, Dimension dimension) throws QuantityFormatException {
@@ -63,7 +83,7 @@ public final class QuantityText {
 
     private static boolean isNumberPart(String s, int i) {
         char c = s.charAt(i);
-        if (Character.isDigit(c) || c == '.' || c == ',' || c == '+' || c == '-') {
+        if (Character.isDigit(c) || c == '.' || c == ',' || c == '+' || c == '-' || c == '\u2212') {
             return true;
         }
         // an exponent only where digits follow, so that a unit may begin with an e

@@ -28,10 +28,10 @@ public enum Unit {
     MILLIGRAM(Dimension.MASS, 1e-6, "mg"),
     MICROGRAM(Dimension.MASS, 1e-9, "µg", "ug"),
 
-    PERCENT(Dimension.CONTENT, 1e-2, "%", "percent", "wt%", "wt.%", "% (m/m)"),
+    PERCENT(Dimension.CONTENT, 1e-2, "%", "percent", "wt%", "wt %", "wt.%", "wt. %", "% (m/m)"),
     FRACTION(Dimension.CONTENT, 1, "1", "g/g", "kg/kg", "fraction"),
 
-    CELSIUS(Dimension.TEMPERATURE, 1, "°C", "degC", "C", "℃"),
+    CELSIUS(Dimension.TEMPERATURE, 1, "°C", "° C", "degC", "C", "℃"),
     KELVIN(Dimension.TEMPERATURE, 1, "K"),
 
     SQUARE_METRE_PER_SECOND(Dimension.DIFFUSIVITY, 1, "m²/s", "m2/s", "m^2/s"),
@@ -129,7 +129,11 @@ public enum Unit {
     }
 
     private static String normalised(String spelling) {
-        // U+03BC (Greek mu) and U+00B5 (micro sign) look alike; U+00BA is the ordinal sign that keyboards give for °
-        return spelling.strip().replace('\u03bc', '\u00b5').replace('\u00ba', '\u00b0');
+        // U+03BC (Greek mu) and U+00B5 (micro sign) look alike; keyboards give U+00BA (ordinal) and U+02DA (ring) for °
+        return spelling.replace('\u00a0', ' ')
+                .strip()
+                .replace('\u03bc', '\u00b5')
+                .replace('\u00ba', '\u00b0')
+                .replace('\u02da', '\u00b0');
     }
 }

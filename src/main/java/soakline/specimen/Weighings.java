@@ -89,11 +89,22 @@ public final class Weighings {
 
     /** Collects weighings, in order of time. One use. */
     public static final class Builder {
-        private double[] times = new double[64];
-        private double[] values = new double[64];
-        private int[] lines = new int[64];
+        private double[] times;
+        private double[] values;
+        private int[] lines;
         private int size;
         private final TreeMap<Integer, String> setAside = new TreeMap<>();
+
+        public Builder() {
+            this(64);
+        }
+
+        /** With room for a number of weighings; a good guess saves copies of a long log. */
+        public Builder(int expected) {
+            times = new double[Math.max(1, expected)];
+            values = new double[times.length];
+            lines = new int[times.length];
+        }
 
         public Builder add(double time, double value, int line) {
             if (!Double.isFinite(time) || !Double.isFinite(value)) {
@@ -126,11 +137,12 @@ public final class Weighings {
         }
 
         public Weighings build() {
-            return new Weighings(
-                    Arrays.copyOf(times, size),
-                    Arrays.copyOf(values, size),
-                    Arrays.copyOf(lines, size),
-                    Collections.unmodifiableMap(setAside));
+            if (size < times.length) {
+                times = Arrays.copyOf(times, size);
+                values = Arrays.copyOf(values, size);
+                lines = Arrays.copyOf(lines, size);
+            }
+            return new Weighings(times, values, lines, Collections.unmodifiableMap(setAside));
         }
     }
 }
