@@ -13,6 +13,9 @@ public enum Code {
     MISSING_WIDTH_LENGTH(Kind.USE),
     OUTPUT_NOT_WRITABLE(Kind.USE),
     OUTPUT_TYPE_UNKNOWN(Kind.USE),
+    OUTPUT_STREAM_FAILED(Kind.USE),
+    COMMAND_UNKNOWN(Kind.USE),
+    COMMAND_WRONG(Kind.USE),
 
     // ---- input that cannot be read or used ----
     FILE_NOT_FOUND(Kind.INPUT),
@@ -34,7 +37,7 @@ public enum Code {
     FACT_NOT_POSITIVE(Kind.INPUT),
     FACT_NOT_ONE_OF(Kind.INPUT),
     TIME_NOT_UNDERSTOOD(Kind.INPUT),
-    DATE_PATTERN_BAD(Kind.INPUT),
+    DATE_PATTERN_BAD(Kind.USE),
     TOO_FEW_WEIGHINGS(Kind.INPUT),
     TIMES_ALL_EQUAL(Kind.INPUT),
     VALUES_ALL_EQUAL(Kind.INPUT),
@@ -107,6 +110,9 @@ public enum Code {
     CAUTION_DRYING_CHANGES(Kind.CAUTION),
     CAUTION_TRAPPED_MOISTURE(Kind.CAUTION),
     CAUTION_HYDROGEN(Kind.CAUTION),
+
+    // ---- several coupons ----
+    REPLICATES_UNLIKE(Kind.NOTE),
 
     // ---- the program itself ----
     NO_DISPLAY(Kind.NOTE),
