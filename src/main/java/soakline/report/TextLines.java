@@ -15,6 +15,13 @@ final class TextLines {
         return this;
     }
 
+    /** An empty line between this and what went before, if anything did. */
+    void separate() {
+        if (text.length() > 0) {
+            blank();
+        }
+    }
+
     /** A line as it stands. */
     TextLines line(String line) {
         text.append(line.stripTrailing()).append('\n');

@@ -12,9 +12,7 @@ public final class TextReport {
     public static String write(List<Assessment> assessments) {
         TextLines lines = new TextLines();
         for (Assessment assessment : assessments) {
-            if (assessment != assessments.get(0)) {
-                lines.blank();
-            }
+            lines.separate();
             new CouponText(assessment, lines).write();
         }
         if (assessments.size() > 1) {
