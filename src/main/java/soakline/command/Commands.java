@@ -5,12 +5,9 @@ import java.io.InputStream;
 import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.Properties;
 import java.util.function.IntSupplier;
-import picocli.CommandLine;
-import picocli.CommandLine.Help.Ansi;
-import picocli.CommandLine.ParameterException;
-import picocli.CommandLine.ParseResult;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Finding;
@@ -20,7 +17,7 @@ import soakline.session.RunReader;
 public final class Commands {
 
     private static final String ESTIMATE = "estimate";
-    private static final String PROGRAM = "java -jar soakline.jar";
+    static final String PROGRAM = "java -jar soakline.jar";
     private static final String HELP = """
             Usage: soakline [COMMAND]
             Diffusivity and equilibrium content of flat coupons, with an honest uncertainty, from weighings.
@@ -60,7 +57,7 @@ public final class Commands {
             case "-h", "--help", "help" -> console.result(HELP);
             case "-V", "--version" -> console.result("Soakline " + version() + "\n");
             case ESTIMATE -> {
-                return estimate(Arrays.copyOfRange(arguments, 1, arguments.length));
+                return estimate(Arrays.asList(arguments).subList(1, arguments.length));
             }
             default ->
                 throw first.startsWith("-")
@@ -70,35 +67,25 @@ public final class Commands {
         return ExitStatus.DONE;
     }
 
-    private int estimate(String... arguments) {
-        CommandLine line = new CommandLine(EstimateOptions.spec());
-        line.setExpandAtFiles(false);
-        ParseResult words;
-        try {
-            words = line.parseArgs(arguments);
-        } catch (ParameterException e) {
-            throw Fault.of(Code.COMMAND_WRONG, sentence(e), PROGRAM + " estimate --help");
-        }
-        if (words.isUsageHelpRequested()) {
-            console.result(line.getUsageMessage(Ansi.OFF));
-            return ExitStatus.DONE;
+    private int estimate(List<String> arguments) {
+        Optional<Words> words = Words.plain(arguments, EstimateOptions.names(false), EstimateOptions.names(true));
+        if (words.isEmpty()) {
+            EstimateParser parser = new EstimateParser();
+            words = parser.parse(arguments);
+            if (words.isEmpty()) {
+                console.result(parser.help());
+                return ExitStatus.DONE;
+            }
         }
         EstimateCommand command;
         try {
-            command = EstimateCommand.of(words);
+            command = EstimateCommand.of(words.get());
         } catch (Fault fault) {
             // a bad value is bad input in a file and wrong use in an option
             console.tell(fault.finding());
             return ExitStatus.WRONG_USE;
         }
         return command.run(reader, console);
-    }
-
-    /** The parser's own words, as far as the first line. */
-    private static String sentence(ParameterException e) {
-        List<String> lines = String.valueOf(e.getMessage()).lines().toList();
-        String line = lines.isEmpty() ? "The options make no sense" : lines.get(0);
-        return line.endsWith(".") ? line.substring(0, line.length() - 1) : line;
     }
 
     private int guarded(IntSupplier work) {

@@ -4,7 +4,6 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import picocli.CommandLine.ParseResult;
 import soakline.inference.Assessment;
 import soakline.inference.AssessmentOptions;
 import soakline.inference.IntervalMethod;
@@ -45,20 +44,20 @@ final class EstimateCommand {
      *
      * @throws soakline.problem.Fault when they make no sense, or the figure could not be written
      */
-    static EstimateCommand of(ParseResult words) {
+    static EstimateCommand of(Words words) {
         List<Path> files = new ArrayList<>();
-        for (String name : words.matchedPositional(0).<List<String>>getValue()) {
+        for (String name : words.files()) {
             files.add(OptionValues.path(name));
         }
         EstimateRequest request =
                 EstimateRequest.of(files).withOverrides(facts(words)).withOptions(options(words));
-        String columns = text(words, EstimateOptions.COLUMNS);
-        if (columns != null) {
-            request = request.withColumns(columns);
+        Optional<String> columns = words.value(EstimateOptions.COLUMNS);
+        if (columns.isPresent()) {
+            request = request.withColumns(columns.get());
         }
-        String datePattern = text(words, EstimateOptions.DATE_PATTERN);
-        if (datePattern != null) {
-            request = request.withDatePattern(datePattern);
+        Optional<String> datePattern = words.value(EstimateOptions.DATE_PATTERN);
+        if (datePattern.isPresent()) {
+            request = request.withDatePattern(datePattern.get());
         }
         return new EstimateCommand(
                 request,
@@ -92,7 +91,7 @@ final class EstimateCommand {
         return status;
     }
 
-    private static Facts facts(ParseResult words) {
+    private static Facts facts(Words words) {
         Facts none = Facts.of("");
         return new Facts(
                 none.specimen(),
@@ -103,34 +102,33 @@ final class EstimateCommand {
                 choice(words, EstimateOptions.EDGES, List.of("bare", "sealed"), List.of(Edges.BARE, Edges.SEALED)),
                 none.temperature(),
                 none.medium(),
-                Optional.ofNullable(text(words, EstimateOptions.DRY_MASS))
+                words.value(EstimateOptions.DRY_MASS)
                         .map(t -> OptionValues.positive(EstimateOptions.DRY_MASS, t, Dimension.MASS, "31.2041 g")),
                 none.balance(),
                 none.note(),
                 none.other());
     }
 
-    private static AssessmentOptions options(ParseResult words) {
+    private static AssessmentOptions options(Words words) {
         choice(words, EstimateOptions.MODEL, List.of("fickian"), List.of("fickian"));
         choice(words, EstimateOptions.NOISE, List.of("estimated"), List.of("estimated"));
         AssessmentOptions options = AssessmentOptions.usual()
-                .withFixed(FixOptions.fixed(texts(words, EstimateOptions.FIX), texts(words, EstimateOptions.FREE)));
+                .withFixed(FixOptions.fixed(words.values(EstimateOptions.FIX), words.values(EstimateOptions.FREE)));
         Optional<IntervalMethod> method = choice(
                 words,
                 EstimateOptions.INTERVAL,
                 List.of(IntervalMethod.PROFILE.code(), IntervalMethod.LINEARISED.code()),
                 List.of(IntervalMethod.PROFILE, IntervalMethod.LINEARISED));
-        String level = text(words, EstimateOptions.LEVEL);
-        if (level != null) {
-            options = options.withLevel(OptionValues.level(EstimateOptions.LEVEL, level));
+        Optional<String> level = words.value(EstimateOptions.LEVEL);
+        if (level.isPresent()) {
+            options = options.withLevel(OptionValues.level(EstimateOptions.LEVEL, level.get()));
         }
         return method.isPresent() ? options.withMethod(method.get()) : options;
     }
 
     /** Looked at before the long work: an ending that is not known and a folder that is not there are said at once. */
-    private static Optional<Path> figure(ParseResult words) {
-        Optional<Path> figure =
-                Optional.ofNullable(text(words, EstimateOptions.FIGURE)).map(OptionValues::path);
+    private static Optional<Path> figure(Words words) {
+        Optional<Path> figure = words.value(EstimateOptions.FIGURE).map(OptionValues::path);
         figure.ifPresent(file -> {
             FigureType.of(file);
             OutputFile.requireWritable(file);
@@ -138,20 +136,11 @@ final class EstimateCommand {
         return figure;
     }
 
-    private static Optional<Quantity> length(ParseResult words, String option, String example) {
-        return Optional.ofNullable(text(words, option))
-                .map(t -> OptionValues.positive(option, t, Dimension.LENGTH, example));
+    private static Optional<Quantity> length(Words words, String option, String example) {
+        return words.value(option).map(t -> OptionValues.positive(option, t, Dimension.LENGTH, example));
     }
 
-    private static <T> Optional<T> choice(ParseResult words, String option, List<String> names, List<T> values) {
-        return Optional.ofNullable(text(words, option)).map(t -> OptionValues.oneOf(option, t, names, values));
-    }
-
-    private static String text(ParseResult words, String option) {
-        return words.matchedOptionValue(option, null);
-    }
-
-    private static List<String> texts(ParseResult words, String option) {
-        return words.matchedOptionValue(option, List.of());
+    private static <T> Optional<T> choice(Words words, String option, List<String> names, List<T> values) {
+        return words.value(option).map(t -> OptionValues.oneOf(option, t, names, values));
     }
 }
