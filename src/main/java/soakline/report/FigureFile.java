@@ -7,8 +7,7 @@ import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.io.OutputStream;
-import java.io.OutputStreamWriter;
-import java.io.Writer;
+import java.io.StringWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
@@ -19,6 +18,7 @@ import org.apache.batik.svggen.SVGGeneratorContext;
 import org.apache.batik.svggen.SVGGraphics2D;
 import org.jfree.chart.JFreeChart;
 import org.w3c.dom.Document;
+import org.w3c.dom.Element;
 import soakline.figure.ChartStyle;
 import soakline.figure.CouponFigure;
 import soakline.inference.Assessment;
@@ -74,9 +74,19 @@ public final class FigureFile {
         SVGGraphics2D graphics = new SVGGraphics2D(context, false);
         graphics.setSVGCanvasSize(new Dimension(WIDTH, HEIGHT * charts.size()));
         draw(charts, graphics);
-        Writer writer = new OutputStreamWriter(out, StandardCharsets.UTF_8);
-        graphics.stream(writer, true);
-        writer.flush();
+        StringWriter text = new StringWriter();
+        Element root = graphics.getRoot();
+        // so that a viewer can scale it
+        root.setAttribute("viewBox", "0 0 " + WIDTH + " " + HEIGHT * charts.size());
+        graphics.stream(root, text, true, false);
+        out.write(withoutDoctype(text.toString()).getBytes(StandardCharsets.UTF_8));
+    }
+
+    /** The type declaration names a page on the web, which strict readers fetch or, offline, fail on. */
+    private static String withoutDoctype(String svg) {
+        int from = svg.indexOf("<!DOCTYPE");
+        int to = svg.indexOf('>', from) + 1;
+        return from < 0 || to <= from ? svg : svg.substring(0, from) + svg.substring(to);
     }
 
     private static Document emptyDrawing() {
