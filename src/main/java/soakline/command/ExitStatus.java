@@ -15,6 +15,10 @@ final class ExitStatus {
     private ExitStatus() {}
 
     static int of(Code code) {
+        if (code == Code.DATE_PATTERN_BAD) {
+            // found while reading, but a slip in an option
+            return WRONG_USE;
+        }
         return switch (code.kind()) {
             case USE -> WRONG_USE;
             case RESULT -> NOT_USABLE;
