@@ -73,6 +73,7 @@ public enum Code {
     NOT_DETERMINED_WIDE(Kind.RESULT),
     NOT_FICKIAN(Kind.WARNING),
     PARAMETER_ALL_FIXED(Kind.USE),
+    REPLICATES_UNLIKE(Kind.NOTE),
 
     // ---- checks, one sentence a verdict ----
     CHECK_UNKNOWN(Kind.NOTE),
@@ -110,9 +111,6 @@ public enum Code {
     CAUTION_DRYING_CHANGES(Kind.CAUTION),
     CAUTION_TRAPPED_MOISTURE(Kind.CAUTION),
     CAUTION_HYDROGEN(Kind.CAUTION),
-
-    // ---- several coupons ----
-    REPLICATES_UNLIKE(Kind.NOTE),
 
     // ---- the program itself ----
     NO_DISPLAY(Kind.NOTE),
