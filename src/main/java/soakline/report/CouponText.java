@@ -73,11 +73,9 @@ final class CouponText {
     private void verdict() {
         String usable = assessment.usable() ? "usable" : "NOT USABLE";
         String determined = assessment.determined() ? "" : " D is not determined.";
-        String apparent = assessment.isApparent() ? " The value is an apparent D." : "";
         lines.blank();
         lines.wrapped(
-                "  Result: ",
-                usable + "." + determined + " " + Wording.sentence(assessment.fickianFinding()) + "." + apparent);
+                "  Result: ", usable + "." + determined + " " + Wording.sentence(assessment.fickianFinding()) + ".");
     }
 
     private void parameters() {

@@ -59,7 +59,7 @@ class TextReportTest {
     void anApparentDiffusivityIsCalledSo() {
         String text = text(InventedAssessments.apparent());
 
-        assertThat(text).contains("The value is an apparent D", "apparent D  ", "uncertainty of apparent D");
+        assertThat(text).contains("value is an apparent D only", "apparent D  ", "uncertainty of apparent D");
         assertThat(text).doesNotContain("D, diffusivity");
     }
 
