@@ -61,7 +61,11 @@ final class EstimateCommand {
         }
         return new EstimateCommand(
                 request,
-                choice(words, EstimateOptions.FORMAT, List.of("text", "json", "csv"), List.of(ResultFormat.values()))
+                choice(
+                                words,
+                                EstimateOptions.FORMAT,
+                                List.of(ResultFormat.TEXT.code(), ResultFormat.JSON.code(), ResultFormat.CSV.code()),
+                                List.of(ResultFormat.TEXT, ResultFormat.JSON, ResultFormat.CSV))
                         .orElse(ResultFormat.TEXT),
                 figure(words));
     }

@@ -60,7 +60,7 @@ final class EstimateOptions {
     static final List<String> FOOTER = List.of(
             "",
             "Options hold in place of what a file says. Quantities carry their unit, with a decimal point or",
-            "comma; \"2.03 mm ± 0.01 mm\" also gives the standard uncertainty.",
+            "comma; \"2.03 mm ± 0.01 mm\" (or +/-) also gives the standard uncertainty.",
             "Results go to standard output, notes and problems to standard error.",
             "Exit status: 0 done; 1 done, but a result is not usable; 2 wrong use; 3 unusable input.");
 

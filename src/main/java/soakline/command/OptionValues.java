@@ -28,6 +28,12 @@ final class OptionValues {
     }
 
     static Quantity quantity(String option, String text, Dimension dimension, String example) {
+        if (text.indexOf('\ufffd') >= 0) {
+            throw Fault.of(
+                    Code.OPTION_BAD,
+                    option,
+                    "\"" + text + "\" holds a sign that this locale does not pass on. Write +/- for ±, um for µm");
+        }
         try {
             return QuantityText.parse(text, dimension);
         } catch (QuantityFormatException e) {

@@ -24,8 +24,9 @@ import soakline.wording.Wording;
 /** One coupon for people. */
 final class CouponText {
 
-    private static final int NAME = 26;
-    private static final int VALUE = 22;
+    private static final int NAME = 25;
+    private static final int VALUE = 20;
+    private static final int ERROR = 17;
     private static final int VERDICT = 13;
     private static final double PERCENT = 100;
 
@@ -81,7 +82,7 @@ final class CouponText {
     private void parameters() {
         lines.blank();
         lines.line("  " + TextLines.cell("", NAME) + TextLines.cell("value", VALUE)
-                + TextLines.cell("standard error", VALUE) + intervalHead());
+                + TextLines.cell("standard error", ERROR) + intervalHead());
         for (ParameterResult result : assessment.parameters()) {
             Parameter parameter = result.parameter();
             ResultUnit unit = parameter.unit();
@@ -96,7 +97,7 @@ final class CouponText {
             String last =
                     result.interval().map(i -> interval(i, unit, error)).orElse(result.fixed() ? "held fixed" : "");
             lines.line("  " + TextLines.cell(ParameterWords.of(parameter, assessment.isApparent()), NAME)
-                    + TextLines.cell(value, VALUE) + TextLines.cell(errorText, VALUE) + last);
+                    + TextLines.cell(value, VALUE) + TextLines.cell(errorText, ERROR) + last);
         }
     }
 

@@ -1,7 +1,6 @@
 package soakline.report;
 
 import java.util.List;
-import java.util.Optional;
 import soakline.inference.Assessment;
 
 /** The forms in which results are written as text. */
@@ -20,15 +19,6 @@ public enum ResultFormat {
     /** Spelling on the command line. */
     public String code() {
         return code;
-    }
-
-    public static Optional<ResultFormat> of(String code) {
-        for (ResultFormat format : values()) {
-            if (format.code.equals(code)) {
-                return Optional.of(format);
-            }
-        }
-        return Optional.empty();
     }
 
     /** All of the coupons, with a line break at the end. */

@@ -158,6 +158,7 @@ class CommandsTest {
                 "--thickness|0 mm|must be more than zero",
                 "--thickness|-2 mm|must be more than zero",
                 "--dry-mass|0 g|must be more than zero",
+                "--thickness|2 mm \ufffd\ufffd 0.01 mm|Write +/- for ±",
                 "--width|1 s|is not known here",
                 "--length|x|is not a number",
                 "--faces|two|not one of both, one",
