@@ -13,6 +13,9 @@ public enum Code {
     MISSING_WIDTH_LENGTH(Kind.USE),
     OUTPUT_NOT_WRITABLE(Kind.USE),
     OUTPUT_TYPE_UNKNOWN(Kind.USE),
+    OUTPUT_STREAM_FAILED(Kind.USE),
+    COMMAND_UNKNOWN(Kind.USE),
+    COMMAND_WRONG(Kind.USE),
 
     // ---- input that cannot be read or used ----
     FILE_NOT_FOUND(Kind.INPUT),
@@ -75,6 +78,7 @@ public enum Code {
     NOT_DETERMINED_WIDE(Kind.RESULT),
     NOT_FICKIAN(Kind.WARNING),
     PARAMETER_ALL_FIXED(Kind.USE),
+    REPLICATES_UNLIKE(Kind.NOTE),
 
     // ---- checks, one sentence a verdict ----
     CHECK_UNKNOWN(Kind.NOTE),
