@@ -123,6 +123,7 @@ public enum Code {
     WAIT_ESTIMATING(Kind.NOTE),
     WAIT_CANCELLED(Kind.NOTE),
     DROP_ONE_FILE(Kind.USE),
+    FACT_EMPTY(Kind.USE),
     FACES_NOT_CHOSEN(Kind.USE),
 
     // ---- the program itself ----

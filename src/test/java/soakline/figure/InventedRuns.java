@@ -68,6 +68,12 @@ public final class InventedRuns {
         return run("Log 3", count, 1.6, 17, 0);
     }
 
+    /** Fewer weighings than an estimate needs. */
+    public static Run tooFew() {
+        return run("P-12 too few", 3, 1, 2, 0);
+    }
+
+    /** The file said nothing about the coupon. */
     public static Run withoutFacts() {
         return run("P-10", 30, 1.5, 23, 0).withFacts(Facts.of("P-10"));
     }

@@ -94,7 +94,7 @@ public record FactsAnswer(Map<Field, String> texts, Optional<Faces> faces, boole
             if (quantity.si() > 0) {
                 return Optional.of(quantity);
             }
-            complaints.put(field, Wording.sentence(Finding.of(Code.FACT_NOT_POSITIVE, field.words(), text)));
+            complaints.put(field, Wording.sentence(Finding.of(Code.FACT_NOT_POSITIVE, capital(field), text)));
         } catch (QuantityFormatException e) {
             complaints.put(field, Wording.sentence(complaint(field, text, e)));
         }
@@ -103,10 +103,15 @@ public record FactsAnswer(Map<Field, String> texts, Optional<Faces> faces, boole
 
     private static Finding complaint(Field field, String text, QuantityFormatException e) {
         return switch (e.reason()) {
-            case UNIT_MISSING -> Finding.of(Code.FACT_UNIT_MISSING, field.words(), text, field.example());
+            case EMPTY -> Finding.of(Code.FACT_EMPTY, capital(field), field.example());
+            case UNIT_MISSING -> Finding.of(Code.FACT_UNIT_MISSING, capital(field), text, field.example());
             case UNIT_UNKNOWN ->
-                Finding.of(Code.FACT_UNIT_UNKNOWN, field.words(), e.part(), Unit.symbols(Dimension.LENGTH));
-            default -> Finding.of(Code.FACT_NOT_A_QUANTITY, field.words(), text, field.example());
+                Finding.of(Code.FACT_UNIT_UNKNOWN, capital(field), e.part(), Unit.symbols(Dimension.LENGTH));
+            default -> Finding.of(Code.FACT_NOT_A_QUANTITY, capital(field), text, field.example());
         };
+    }
+
+    private static String capital(Field field) {
+        return Character.toUpperCase(field.words().charAt(0)) + field.words().substring(1);
     }
 }

@@ -46,7 +46,7 @@ final class FindingsWriter {
                 writer.intervalHead(),
                 writer.parameters(),
                 writer.contributions(),
-                assessment.checks().stream().map(FindingsWriter::check).toList(),
+                assessment.checks().stream().map(writer::check).toList(),
                 sentences(assessment.cautions()),
                 sentences(assessment.notes()),
                 writer.coupon());
@@ -62,9 +62,12 @@ final class FindingsWriter {
         if (!assessment.determined() || d.isEmpty()) {
             return new Headline(Verdict.FAIL, "D not determined", "No diffusivity can be given from these weighings");
         }
-        String name = assessment.isApparent() ? "apparent D" : "D";
         String fickian = Wording.sentence(assessment.fickianFinding());
-        return new Headline(assessment.fickian(), name + " = " + valueWithUnit(d.get()), fickian);
+        return new Headline(assessment.fickian(), symbol() + " = " + valueWithUnit(d.get()), fickian);
+    }
+
+    private String symbol() {
+        return assessment.isApparent() ? "apparent D" : "D";
     }
 
     private String intervalHead() {
@@ -105,7 +108,7 @@ final class FindingsWriter {
 
     private static Row combined(CombinedUncertainty combined, ParameterResult d) {
         double value = d.value().orElse(0);
-        return new Row("… with coupon size", "", Scientific.interval(value, combined.low(), combined.high()));
+        return new Row("D, with lengths", "", Scientific.interval(value, combined.low(), combined.high()));
     }
 
     private static String valueWithUnit(ParameterResult result) {
@@ -142,13 +145,13 @@ final class FindingsWriter {
                 .orElse("");
     }
 
-    private static CheckLine check(Check check) {
+    private CheckLine check(Check check) {
         String detail = "";
         if (check.diffusivity().isPresent()) {
             double d = check.diffusivity().getAsDouble();
             boolean closed = check.low().isPresent() && check.high().isPresent();
             double error = closed ? (check.high().getAsDouble() - check.low().getAsDouble()) / 4 : Double.NaN;
-            detail = "D = " + Scientific.value(d, error) + " m²/s"
+            detail = symbol() + " = " + Scientific.value(d, error) + " m²/s"
                     + (closed ? ", " + Scientific.interval(d, check.low(), check.high()) : "");
         }
         return new CheckLine(

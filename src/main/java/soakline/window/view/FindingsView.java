@@ -19,6 +19,7 @@ final class FindingsView extends JPanel {
 
     private static final long serialVersionUID = 1L;
 
+    private static final int LONG_HEADLINE = 22;
     private static final String PLAIN = "defaultFont";
     private static final String TEXT = "Label.foreground";
     private static final String QUIET = "Soakline.quietText";
@@ -37,6 +38,9 @@ final class FindingsView extends JPanel {
     void show(Findings findings) {
         Column column = new Column("insets #16 #18 #20 #16, wrap 1, gapy #6", "[grow, fill, 0::]", "");
         column.setBackground(Look.paper());
+        // so that the arrow and page keys can scroll it
+        column.setFocusable(true);
+        column.getAccessibleContext().setAccessibleName("Findings");
         headline(column, findings.headline());
         sentences(column, "Problems", findings.problems(), Verdict.CAUTION);
         parameters(column, findings);
@@ -52,7 +56,8 @@ final class FindingsView extends JPanel {
     private static void headline(Column column, Headline headline) {
         JLabel mark = mark(headline.verdict(), 22);
         column.put(mark, "split 2, top, gaptop #3, w #22!, grow 0");
-        WrappingText large = new WrappingText(headline.large(), "h1.font", TEXT);
+        WrappingText large = new WrappingText(
+                headline.large(), headline.large().length() > LONG_HEADLINE ? "h2.font" : "h1.font", TEXT);
         large.setName("headline");
         column.put(large, "growx, pushx, wmin 0, gapleft #8");
         WrappingText small = WrappingText.quiet(headline.small());
@@ -62,8 +67,8 @@ final class FindingsView extends JPanel {
 
     private static void parameters(Column column, Findings findings) {
         section(column, "Parameters");
-        Column table = new Column(
-                "insets 0, wrap 3, gapx #12, gapy #5", "[grow 10, fill, 0::][fill, 0::][fill, grow 40, 0::]", "");
+        Column table =
+                new Column("insets 0, wrap 3, gapx #8, gapy #5", "[grow, fill, 0::][#128!, fill][#150!, fill]", "");
         table.setOpaque(false);
         table.put(WrappingText.quiet("Name"), "wmin 0, growx");
         table.put(WrappingText.quiet("Value"), "wmin 0, growx");

@@ -15,6 +15,12 @@ import soakline.figure.ChartStyle.Ink;
 /** The look and feel, and what is read from it. */
 final class Look {
 
+    /** Style of the button that goes on. */
+    static final String MAIN_BUTTON =
+            "background: $Component.accentColor; foreground: $Soakline.onAccent; borderColor: $Component.accentColor;"
+                    + " hoverBackground: $Soakline.accentHover; pressedBackground: $Soakline.accentHover;"
+                    + " focusedBackground: $Component.accentColor; margin: 6,20,6,20";
+
     private Look() {}
 
     /** Before the first component is made. */

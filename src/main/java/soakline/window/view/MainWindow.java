@@ -29,7 +29,7 @@ final class MainWindow {
 
     private static final Dimension USUAL_SIZE = new Dimension(1400, 900);
     private static final Dimension LEAST_SIZE = new Dimension(640, 480);
-    private static final int FINDINGS_WIDTH = 430;
+    private static final int FINDINGS_WIDTH = 450;
 
     private final JFrame frame = new JFrame("Soakline");
     private final WindowPreferences preferences;
@@ -78,6 +78,7 @@ final class MainWindow {
         frame.getContentPane().add(toolBar, BorderLayout.NORTH);
         frame.getContentPane().add(centre, BorderLayout.CENTER);
         frame.getContentPane().add(statusBar, BorderLayout.SOUTH);
+        frame.setFocusTraversalPolicy(new PastWords());
         frame.getRootPane().setTransferHandler(new FileDrop(presenter::drop));
         frame.setMinimumSize(new Dimension(Look.px(LEAST_SIZE.width), Look.px(LEAST_SIZE.height)));
         frame.setSize(Look.px(USUAL_SIZE.width), Look.px(USUAL_SIZE.height));

@@ -30,6 +30,8 @@ final class MissingFactsView extends JPanel {
     private final Map<Field, WrappingText> complaints = new EnumMap<>(Field.class);
     private final JRadioButton both = new JRadioButton("Both faces");
     private final JRadioButton one = new JRadioButton("One face, the other sealed");
+    private final JButton estimate = new JButton("Estimate");
+    private Question question;
     private final JCheckBox forAll = new JCheckBox("Use this for every coupon of the file that lacks it");
 
     /**
@@ -46,10 +48,16 @@ final class MissingFactsView extends JPanel {
         both.setMnemonic('B');
         one.setMnemonic('N');
         forAll.setMnemonic('U');
+        estimate.setName("estimate");
+        estimate.setMnemonic('E');
+        estimate.setToolTipText("Estimate with these facts");
+        estimate.putClientProperty("FlatLaf.style", Look.MAIN_BUTTON);
+        estimate.addActionListener(event -> submit());
         add(scroll);
     }
 
-    void show(Question question) {
+    void show(Question asked) {
+        question = asked;
         fields.clear();
         complaints.clear();
         Column page = new Column("insets #40 #32 #32 #32", "[grow, left]", "");
@@ -75,11 +83,6 @@ final class MissingFactsView extends JPanel {
             forAll.setOpaque(false);
             form.put(forAll, "gaptop #6");
         }
-        JButton estimate = new JButton("Estimate");
-        estimate.setName("estimate");
-        estimate.setMnemonic('E');
-        estimate.setToolTipText("Estimate with these facts");
-        estimate.addActionListener(event -> submit(question));
         form.put(estimate, "grow 0, gaptop #12");
         page.put(form, "growx, wmin 0, wmax #560");
         scroll.setViewportView(page);
@@ -94,8 +97,11 @@ final class MissingFactsView extends JPanel {
         group.clearSelection();
         both.setOpaque(false);
         one.setOpaque(false);
-        form.put(both, "split 2, grow 0");
-        form.put(one, "grow 0, gapleft #16");
+        Column row = new Column("insets 0, gapx #20", "[][]", "");
+        row.setOpaque(false);
+        row.put(both, "");
+        row.put(one, "");
+        form.put(row, "growx, wmin 0");
         complaint(form, Field.FACES);
     }
 
@@ -107,20 +113,14 @@ final class MissingFactsView extends JPanel {
         JLabel label = new JLabel(capital(field.words()));
         label.setDisplayedMnemonic(mnemonic);
         label.setLabelFor(text);
-        form.put(label, "split 2, grow 0, w #80!");
-        form.put(text, "growx, wmin 0, wmax #300");
-        text.addActionListener(event -> ((JButton) named(form, "estimate")).doClick());
+        Column row = new Column("insets 0, gapx #8", "[#80!][0:#280:#280]", "");
+        row.setOpaque(false);
+        row.put(label, "");
+        row.put(text, "growx, wmin 0");
+        form.put(row, "growx, wmin 0");
+        text.addActionListener(event -> estimate.doClick());
         fields.put(field, text);
         complaint(form, field);
-    }
-
-    private static java.awt.Component named(Column form, String name) {
-        for (java.awt.Component part : form.getComponents()) {
-            if (name.equals(part.getName())) {
-                return part;
-            }
-        }
-        throw new IllegalStateException(name);
     }
 
     private void complaint(Column form, Field field) {
@@ -131,7 +131,7 @@ final class MissingFactsView extends JPanel {
         form.put(text, "growx, wmin 0, hidemode 3, gapbottom #8");
     }
 
-    private void submit(Question question) {
+    private void submit() {
         Map<Field, String> texts = new EnumMap<>(Field.class);
         fields.forEach((field, text) -> texts.put(field, text.getText()));
         Map<Field, String> faults =

@@ -40,7 +40,7 @@ final class WelcomeView extends JPanel {
         column.put(WrappingText.plain(Wording.sentence(Finding.of(Code.WELCOME_OPEN))), "growx, wmin 0");
         JButton button = new JButton(open);
         button.setName("welcome-open");
-        button.putClientProperty("JButton.buttonType", "default");
+        button.putClientProperty("FlatLaf.style", Look.MAIN_BUTTON);
         column.put(button, "grow 0, gapbottom #14");
         if (!welcome.samples().isEmpty()) {
             column.put(WrappingText.plain(Wording.sentence(Finding.of(Code.WELCOME_SAMPLES))), "growx, wmin 0");
@@ -66,6 +66,7 @@ final class WelcomeView extends JPanel {
         JButton button = new JButton(sample.words());
         button.setName("sample-" + sample.file());
         button.setToolTipText("Open the sample run " + sample.file());
+        button.putClientProperty("FlatLaf.style", "margin: 6,12,6,12");
         button.setHorizontalAlignment(SwingConstants.LEADING);
         button.addActionListener(event -> openSample.accept(sample.file()));
         return button;
