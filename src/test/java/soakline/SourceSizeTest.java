@@ -95,7 +95,7 @@ class SourceSizeTest {
                     found.add(unit.getSourceFile().getName() + ": " + method.getName() + "() has " + lines + " lines");
                 }
             }
-            return super.visitMethod(method, nothing);
+            return super.visitMethod(method, null);
         }
     }
 }

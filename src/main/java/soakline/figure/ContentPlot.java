@@ -60,7 +60,7 @@ final class ContentPlot {
         }
         Optional<DefaultXYDataset> line = shortTimeLine();
         if (line.isPresent()) {
-            add(plot, next++, line.get(), Markers.line(style.ink(Ink.SHORT_TIME), style.dashed(1.8)));
+            add(plot, next++, line.get(), Markers.line(style.ink(Ink.SHORT_TIME), style.dashed(1.8), style));
         }
         OptionalDouble plateau = plateau();
         if (plateau.isPresent()) {
@@ -69,10 +69,10 @@ final class ContentPlot {
                     plot,
                     next++,
                     DrawnWeighings.set("plateau M∞", ends),
-                    Markers.line(style.ink(Ink.PLATEAU), style.dotted(2.2)));
+                    Markers.line(style.ink(Ink.PLATEAU), style.dotted(2.2), style));
         }
         if (assessment.estimate().isOptimum()) {
-            add(plot, next, curve(), Markers.line(style.ink(Ink.CURVE), style.solid(2)));
+            add(plot, next, curve(), Markers.line(style.ink(Ink.CURVE), style.solid(2), style));
         }
         return plot;
     }

@@ -23,7 +23,7 @@ final class Markers {
     /** Filled translucent discs, smaller where there are many; a band from extreme to extreme where not all are drawn. */
     static XYLineAndShapeRenderer used(DrawnWeighings points, RootTime rootTime, ChartStyle style) {
         if (points.isReduced()) {
-            XYLineAndShapeRenderer band = line(style.translucent(Ink.WEIGHING), style.solid(1));
+            XYLineAndShapeRenderer band = line(style.translucent(Ink.WEIGHING), style.solid(1), style);
             return band;
         }
         double size = style.length(points.drawn() > MANY ? 3.5 : 7);
@@ -54,12 +54,12 @@ final class Markers {
         return renderer;
     }
 
-    static XYLineAndShapeRenderer line(Color ink, Stroke stroke) {
+    static XYLineAndShapeRenderer line(Color ink, Stroke stroke, ChartStyle style) {
         XYLineAndShapeRenderer renderer = new XYLineAndShapeRenderer(true, false);
         renderer.setDrawSeriesLineAsPath(true);
         renderer.setSeriesPaint(0, ink);
         renderer.setSeriesStroke(0, stroke);
-        renderer.setLegendLine(new Line2D.Double(-11, 0, 11, 0));
+        renderer.setLegendLine(new Line2D.Double(-style.length(11), 0, style.length(11), 0));
         return renderer;
     }
 

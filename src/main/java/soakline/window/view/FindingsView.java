@@ -68,7 +68,7 @@ final class FindingsView extends JPanel {
     private static void parameters(Column column, Findings findings) {
         section(column, "Parameters");
         Column table =
-                new Column("insets 0, wrap 3, gapx #8, gapy #5", "[grow, fill, 0::][#128!, fill][#150!, fill]", "");
+                new Column("insets 0, wrap 3, gapx #8, gapy #5", tableColumns(column, findings.parameters()), "");
         table.setOpaque(false);
         table.put(WrappingText.quiet("Name"), "wmin 0, growx");
         table.put(WrappingText.quiet("Value"), "wmin 0, growx");
@@ -82,6 +82,20 @@ final class FindingsView extends JPanel {
         if (!findings.contributions().isEmpty()) {
             column.put(WrappingText.quiet(findings.contributions()), "growx, wmin 0");
         }
+    }
+
+    /** Value and interval on one line each, and what is left to the name. */
+    private static String tableColumns(Column column, List<Row> rows) {
+        int value = 0;
+        int interval = 0;
+        for (Row row : rows) {
+            value = Math.max(value, column.getFontMetrics(Look.font("h4.font")).stringWidth(row.value()));
+            interval =
+                    Math.max(interval, column.getFontMetrics(Look.font(PLAIN)).stringWidth(row.extra()));
+        }
+        // a little more than the words, for text areas wrap at their very edge
+        int slack = Look.px(4);
+        return "[grow, fill, 0::][" + (value + slack) + "px!, fill][" + (interval + slack) + "px!, fill]";
     }
 
     private static void checks(Column column, List<CheckLine> checks) {

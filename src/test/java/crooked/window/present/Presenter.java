@@ -9,6 +9,6 @@ public final class Presenter {
     private Presenter() {}
 
     public static Object label() {
-        return new JLabel(new Panel().toString());
+        return new JLabel(new Panel().getClass().getName());
     }
 }

@@ -15,7 +15,6 @@ import javax.swing.JComponent;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.TransferHandler.TransferSupport;
-import org.assertj.swing.core.KeyPressInfo;
 import org.assertj.swing.core.matcher.JButtonMatcher;
 import org.assertj.swing.edt.GuiActionRunner;
 import org.assertj.swing.finder.JFileChooserFinder;
@@ -129,9 +128,10 @@ class WindowTest {
 
     @Test
     void controlOOpensTheChooser() {
-        frame.button("open")
-                .focus()
-                .pressAndReleaseKey(KeyPressInfo.keyCode(KeyEvent.VK_O).modifiers(KeyEvent.CTRL_DOWN_MASK));
+        frame.button("open").focus();
+        frame.robot().pressKey(KeyEvent.VK_CONTROL);
+        frame.robot().pressAndReleaseKeys(KeyEvent.VK_O);
+        frame.robot().releaseKey(KeyEvent.VK_CONTROL);
         JFileChooserFinder.findFileChooser("open-chooser")
                 .withTimeout(10_000)
                 .using(frame.robot())
