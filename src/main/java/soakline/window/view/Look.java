@@ -6,6 +6,7 @@ import com.formdev.flatlaf.FlatLightLaf;
 import com.formdev.flatlaf.util.UIScale;
 import java.awt.Color;
 import java.awt.Font;
+import javax.swing.JComponent;
 import javax.swing.JDialog;
 import javax.swing.JFrame;
 import javax.swing.UIManager;
@@ -76,6 +77,11 @@ final class Look {
     /** A length in the user's scale. */
     static int px(int pixels) {
         return UIScale.scale(pixels);
+    }
+
+    /** The width of a row of digits in the look's font. */
+    static int digits(JComponent component, int count) {
+        return component.getFontMetrics(UIManager.getFont("Label.font")).charWidth('0') * count;
     }
 
     /** MigLayout constraints with lengths in the user's scale: each {@code #12} becomes 12 scaled pixels. */

@@ -29,7 +29,8 @@ final class MainWindow {
 
     private static final Dimension USUAL_SIZE = new Dimension(1400, 900);
     private static final Dimension LEAST_SIZE = new Dimension(640, 480);
-    private static final int FINDINGS_WIDTH = 450;
+    /** Digits side by side: the table of parameters must fit whatever the font. */
+    private static final int FINDINGS_DIGITS = 56;
 
     private final JFrame frame = new JFrame("Soakline");
     private final WindowPreferences preferences;
@@ -66,7 +67,7 @@ final class MainWindow {
         result.setName("result");
         result.setResizeWeight(1);
         result.setBorder(BorderFactory.createEmptyBorder());
-        findingsView.setPreferredSize(new Dimension(Look.px(FINDINGS_WIDTH), 0));
+        findingsView.setPreferredSize(new Dimension(Look.digits(findingsView, FINDINGS_DIGITS), 0));
         findingsView.setMinimumSize(new Dimension(Look.px(280), 0));
         chartView.setMinimumSize(new Dimension(Look.px(260), 0));
         content.add(welcomeView, Welcome.class.getName());
