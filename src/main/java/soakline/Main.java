@@ -3,8 +3,11 @@ package soakline;
 import java.nio.file.Path;
 import soakline.command.Commands;
 import soakline.command.Console;
+import soakline.intake.ReadOptions;
+import soakline.intake.RunFileReader;
 import soakline.problem.Code;
 import soakline.problem.Finding;
+import soakline.session.EstimateRequest;
 import soakline.session.RunReader;
 
 /** Where the program starts and where its parts are put together. */
@@ -31,10 +34,15 @@ public final class Main {
     }
 
     private static RunReader reader() {
-        return StandInReader::read;
+        return (file, request, progress) -> RunFileReader.read(file, options(request), progress::accept);
     }
 
     private static RunReader sampleReader() {
-        return (file, request, progress) -> StandInReader.readText(file.toString(), SampleRuns.text(file.toString()));
+        return (file, request, progress) ->
+                RunFileReader.readText(file.toString(), SampleRuns.text(file.toString()), options(request));
+    }
+
+    private static ReadOptions options(EstimateRequest request) {
+        return new ReadOptions(request.columns(), request.datePattern());
     }
 }

@@ -3,6 +3,7 @@ package soakline;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
+import java.util.List;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 
@@ -11,6 +12,16 @@ final class SampleRuns {
 
     /** The one that is shown where there is no display. */
     static final String FIRST = "01-both-faces.csv";
+
+    /** All of them, in order. */
+    static final List<String> NAMES = List.of(
+            FIRST,
+            "02-drying.csv",
+            "03-one-face-dates.csv",
+            "04-stopped-early.csv",
+            "05-bare-edges.csv",
+            "06-three-coupons.csv",
+            "07-two-stages.csv");
 
     private static final String FOLDER = "/soakline/sample-runs/";
 

@@ -1,11 +1,14 @@
 package soakline;
 
-/** Opens the window. */
+import java.util.Optional;
+import soakline.window.view.SoaklineWindow;
+
+/** Opens the window. Apart from {@link Main}, so that a command loads nothing of a window. */
 final class WindowStarter {
 
     private WindowStarter() {}
 
     static void start() {
-        // the window takes its place here when its room is built
+        SoaklineWindow.open(new FileCoupons(), Optional.empty());
     }
 }

@@ -117,6 +117,24 @@ public enum Code {
     CAUTION_TRAPPED_MOISTURE(Kind.CAUTION),
     CAUTION_HYDROGEN(Kind.CAUTION),
 
+    // ---- the figure and the window ----
+    FIGURE_REDUCED(Kind.NOTE),
+    FIGURE_OUTSIDE(Kind.NOTE),
+    FIGURE_STOPPED_EARLY(Kind.RESULT),
+    FIGURE_NOT_DETERMINED(Kind.RESULT),
+    WELCOME_OPEN(Kind.NOTE),
+    WELCOME_SAMPLES(Kind.NOTE),
+    ASK_FACTS(Kind.NOTE),
+    ASK_THICKNESS(Kind.NOTE),
+    ASK_FACES(Kind.NOTE),
+    ASK_SIZE(Kind.NOTE),
+    WAIT_READING(Kind.NOTE),
+    WAIT_ESTIMATING(Kind.NOTE),
+    WAIT_CANCELLED(Kind.NOTE),
+    DROP_ONE_FILE(Kind.USE),
+    FACT_EMPTY(Kind.USE),
+    FACES_NOT_CHOSEN(Kind.USE),
+
     // ---- the program itself ----
     NO_DISPLAY(Kind.NOTE),
     UNEXPECTED(Kind.INPUT);

@@ -2,6 +2,7 @@ package soakline.quantity;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.util.Locale;
 import java.util.OptionalDouble;
 import java.util.regex.Pattern;
 

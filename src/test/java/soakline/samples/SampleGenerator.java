@@ -17,14 +17,15 @@ import java.util.function.DoubleUnaryOperator;
  * Makes the runs in {@code sample-runs}: invented weighings from known parameters, each file from its own seed. The scenario: a small
  * workshop qualifies the invented resin "Marl 40" and a laminate of it for the covers of river-level sensors.
  *
- * <p>To write them anew: {@code mvn -q test-compile exec:java} is not needed; run this class with the folder as its argument. A
- * test holds the files and this class together. The curves come from a plain sum of the long-time series, not from the program.
+ * <p>To write them anew after {@code mvn test-compile}: {@code java -cp target/test-classes soakline.samples.SampleGenerator
+ * sample-runs}. A test holds the files and this class together. The curves come from a plain sum of the long-time series, not from
+ * the program.
  */
-public final class SampleRuns {
+public final class SampleGenerator {
 
     private static final double HOUR = 3600;
 
-    private SampleRuns() {}
+    private SampleGenerator() {}
 
     public static void main(String[] args) throws IOException {
         Path folder = Path.of(args.length > 0 ? args[0] : "sample-runs");

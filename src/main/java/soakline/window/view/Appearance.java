@@ -1,0 +1,7 @@
+package soakline.window.view;
+
+/** Light or dark. */
+enum Appearance {
+    LIGHT,
+    DARK
+}
