@@ -154,16 +154,25 @@ public final class Assessor {
             results.add(withoutValue(task.parameters().get(i)));
         }
         results.add(withoutValue(Parameter.EQUILIBRIUM_CONTENT));
-        results.add(result(estimate, task.startIndex(), options));
-        if (task.form() == LevelForm.INITIAL_SLOPE) {
-            results.add(result(estimate, task.levelIndex(), options));
-        } else if (!task.isFixed(task.levelIndex())) {
-            EstimationTask slopeTask = task.withInitialSlope();
-            double[] start = estimate.working();
-            start[task.levelIndex()] = estimate.rise() * estimate.model().initialSlope(estimate.shape());
-            results.add(result(Estimator.refit(slopeTask, start), slopeTask.levelIndex(), options));
+        if (task.isFixed(task.levelIndex())) {
+            results.add(result(estimate, task.startIndex(), options));
+            return results;
         }
+        // on the way to its limits D may tend to 0 and M∞ grow without end; in this form the fit goes with it
+        Estimate slope = inSlopeForm(estimate);
+        results.add(result(slope, task.startIndex(), options));
+        results.add(result(slope, task.levelIndex(), options));
         return results;
+    }
+
+    private static Estimate inSlopeForm(Estimate estimate) {
+        EstimationTask task = estimate.task();
+        if (task.form() == LevelForm.INITIAL_SLOPE) {
+            return estimate;
+        }
+        double[] start = estimate.working();
+        start[task.levelIndex()] = estimate.rise() * estimate.model().initialSlope(estimate.shape());
+        return Estimator.refit(task.withInitialSlope(), start);
     }
 
     private static ParameterResult withoutValue(Parameter parameter) {
