@@ -12,7 +12,6 @@ import soakline.quantity.Dimension;
 import soakline.quantity.Quantity;
 import soakline.report.FigureFile;
 import soakline.report.FigureType;
-import soakline.report.OutputFile;
 import soakline.report.ResultFormat;
 import soakline.session.EstimateCoupons;
 import soakline.session.EstimateRequest;
@@ -20,6 +19,7 @@ import soakline.session.RunReader;
 import soakline.specimen.Edges;
 import soakline.specimen.Faces;
 import soakline.specimen.Facts;
+import soakline.workspace.OutputFile;
 
 /** The command {@code estimate}: everything is worked out before anything is written. */
 final class EstimateCommand {

@@ -24,6 +24,7 @@ import soakline.figure.CouponFigure;
 import soakline.inference.Assessment;
 import soakline.problem.Code;
 import soakline.problem.Fault;
+import soakline.workspace.OutputFile;
 
 /** Writes the pictures of coupons, one below the other, as SVG or PNG. The same coupons give the same bytes. */
 public final class FigureFile {

@@ -87,6 +87,45 @@ public final class Weighings {
         return new Weighings(times, values, lines, Collections.unmodifiableMap(next));
     }
 
+    /** The same weighings with one more, in its place by time, behind those of the same time. */
+    public Weighings adding(double time, double value) {
+        return rebuilt(-1, time, value, 0, null);
+    }
+
+    /** The same weighings with one corrected; it moves to its place by time and keeps its line and reason. */
+    public Weighings correcting(int index, double time, double value) {
+        boolean same = times[index] == time && values[index] == value;
+        return same ? this : rebuilt(index, time, value, lines[index], setAside.get(index));
+    }
+
+    /** The same weighings without one. */
+    public Weighings removing(int index) {
+        return rebuilt(index, Double.NaN, Double.NaN, 0, null);
+    }
+
+    /** Without the one at an index, and with another one if its time is a number. */
+    private Weighings rebuilt(int without, double time, double value, int line, String reason) {
+        Builder builder = new Builder(times.length + 1);
+        boolean pending = !Double.isNaN(time);
+        for (int i = 0; i < times.length; i++) {
+            if (i == without) {
+                continue;
+            }
+            // a corrected weighing stays in front of others of its time that stood behind it
+            boolean first = without >= 0 && i > without;
+            boolean behind = first ? times[i] >= time : times[i] > time;
+            if (pending && behind) {
+                builder.put(time, value, line, reason);
+                pending = false;
+            }
+            builder.put(times[i], values[i], lines[i], setAside.get(i));
+        }
+        if (pending) {
+            builder.put(time, value, line, reason);
+        }
+        return builder.build();
+    }
+
     /** Collects weighings, in order of time. One use. */
     public static final class Builder {
         private double[] times;
@@ -127,9 +166,15 @@ public final class Weighings {
         }
 
         public Builder addSetAside(double time, double value, int line, String reason) {
-            add(time, value, line);
-            setAside.put(size - 1, reason);
+            put(time, value, line, reason);
             return this;
+        }
+
+        private void put(double time, double value, int line, String reason) {
+            add(time, value, line);
+            if (reason != null) {
+                setAside.put(size - 1, reason);
+            }
         }
 
         public int size() {

@@ -1,4 +1,4 @@
-package soakline.report;
+package soakline.workspace;
 
 import java.io.BufferedOutputStream;
 import java.io.IOException;

@@ -1,4 +1,4 @@
-package soakline.report;
+package soakline.workspace;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
