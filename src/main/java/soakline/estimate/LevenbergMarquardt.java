@@ -1,5 +1,7 @@
 package soakline.estimate;
 
+import java.util.List;
+import java.util.stream.Stream;
 import org.apache.commons.math3.exception.ConvergenceException;
 import org.apache.commons.math3.exception.MathIllegalStateException;
 import org.apache.commons.math3.fitting.leastsquares.LevenbergMarquardtOptimizer;
@@ -19,15 +21,21 @@ public final class LevenbergMarquardt {
     /** Lower ones are refused near the optimum although the point is right; the polish gives the digits that are left. */
     private static final double TOLERANCE = 1e-14;
 
-    private static final int MOST_EVALUATIONS = 500;
-    private static final int MOST_POLISH_STEPS = 12;
+    private static final int MOST_EVALUATIONS = 5000;
+    /** A log starts from the estimate of a thinned one, so it has no long way to go, and each evaluation takes its time. */
+    private static final int MOST_EVALUATIONS_OF_LOG = 100;
+
+    private static final int SHORT = 10_000;
+    private static final int MOST_POLISH_STEPS = 60;
     /** A polished point is settled when the step would remove less than this share of the sum of squares. */
     private static final double SETTLED = 1e-24;
     /** A point counts as an optimum when a Gauss–Newton step would not remove more than this share. */
     private static final double OPTIMUM = 1e-8;
 
-    private static final LevenbergMarquardtOptimizer OPTIMISER =
-            new LevenbergMarquardtOptimizer(100, TOLERANCE, TOLERANCE, TOLERANCE, Precision.SAFE_MIN);
+    /** Bounds of the first step, tried in turn: a long first step may land where the model is flat. */
+    private static final List<LevenbergMarquardtOptimizer> OPTIMISERS = Stream.of(100.0, 1.0, 0.1)
+            .map(bound -> new LevenbergMarquardtOptimizer(bound, TOLERANCE, TOLERANCE, TOLERANCE, Precision.SAFE_MIN))
+            .toList();
 
     private LevenbergMarquardt() {}
 
@@ -86,22 +94,36 @@ public final class LevenbergMarquardt {
      * @param start one value per free parameter; not changed
      */
     public static Solution solve(ResidualModel model, double[] start) {
-        ReducedProblem problem = new ReducedProblem(model, start, MOST_EVALUATIONS);
-        double[] point = start.clone();
-        if (!model.isLinear()) {
-            try {
-                point = OPTIMISER.optimize(problem).getPoint().toArray();
-            } catch (ConvergenceException e) {
-                // thrown also when no better point can be told from the best; the polish decides
-                point = problem.bestPoint();
-            } catch (MathIllegalStateException e) {
-                return new Solution(
-                        problem.bestPoint(),
-                        problem.reduce(problem.bestPoint()),
-                        problem.bestSumOfSquares(),
-                        problem.evaluations(),
-                        Ending.NOT_CONVERGED);
+        int most = model.observations() <= SHORT ? MOST_EVALUATIONS : MOST_EVALUATIONS_OF_LOG;
+        if (model.isLinear()) {
+            return polish(new ReducedProblem(model, start, most), start.clone());
+        }
+        Solution best = null;
+        for (LevenbergMarquardtOptimizer optimiser : OPTIMISERS) {
+            Solution solution = solve(new ReducedProblem(model, start, most), optimiser);
+            if (solution.ending() == Ending.CONVERGED) {
+                return solution;
             }
+            best = best == null || solution.sumOfSquares() < best.sumOfSquares() ? solution : best;
+        }
+        return best;
+    }
+
+    private static Solution solve(ReducedProblem problem, LevenbergMarquardtOptimizer optimiser) {
+        double[] point;
+        try {
+            point = optimiser.optimize(problem).getPoint().toArray();
+        } catch (ConvergenceException e) {
+            // thrown also when no better point can be told from the best; the polish decides
+            point = problem.bestPoint();
+        } catch (MathIllegalStateException e) {
+            point = problem.bestPoint();
+            return new Solution(
+                    point,
+                    problem.reduce(point),
+                    problem.bestSumOfSquares(),
+                    problem.evaluations(),
+                    Ending.NOT_CONVERGED);
         }
         return polish(problem, point);
     }
@@ -133,7 +155,7 @@ public final class LevenbergMarquardt {
             double nextSum = LinearLeastSquares.sumOfSquares(nextTriangle, n);
             double nextRemovable = LinearLeastSquares.removable(nextTriangle, n);
             // the sum is flat at the optimum, so what a further step would remove is the finer judge
-            if (!(nextSum <= sum * (1 + 1e-12)) || !(nextRemovable < removable)) {
+            if (!(nextSum <= sum * (1 + 1e-9)) || !(nextRemovable < removable)) {
                 break;
             }
             point = next;
