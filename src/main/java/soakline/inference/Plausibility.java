@@ -14,12 +14,12 @@ import soakline.specimen.Run;
 final class Plausibility {
 
     /** Diffusivities met in solids, m²/s, with a margin on either side (common practice, no source). */
-    private static final double SLOWEST = 1e-18;
+    private static final double SLOWEST = 1e-17;
 
     private static final double FASTEST = 1e-6;
 
     /** Thicknesses of coupons, m: from a film to a block; outside it a unit is usually wrong (common practice, no source). */
-    private static final double THINNEST = 1e-6;
+    private static final double THINNEST = 3e-6;
 
     private static final double THICKEST = 0.05;
 

@@ -1,0 +1,34 @@
+package soakline;
+
+import java.nio.file.Path;
+import java.util.List;
+import soakline.inference.Assessment;
+import soakline.inference.AssessmentOptions;
+import soakline.inference.Assessor;
+import soakline.intake.Progress;
+import soakline.intake.ReadOptions;
+import soakline.intake.RunFileReader;
+import soakline.specimen.Run;
+
+/** The sample runs for tests of any room. */
+public final class Samples {
+
+    private Samples() {}
+
+    public static Path file(String name) {
+        return Path.of("sample-runs", name);
+    }
+
+    public static List<Run> runs(String name) {
+        return RunFileReader.read(file(name), ReadOptions.of(), Progress.NONE);
+    }
+
+    /** The first coupon of a sample run. */
+    public static Run run(String name) {
+        return runs(name).get(0);
+    }
+
+    public static Assessment assessment(String name) {
+        return Assessor.assess(run(name), AssessmentOptions.usual());
+    }
+}
