@@ -33,7 +33,7 @@ public final class Main {
         return new Commands(sampleReader(), console).estimate(Path.of(SampleRuns.FIRST));
     }
 
-    private static RunReader reader() {
+    static RunReader reader() {
         return (file, request, progress) -> RunFileReader.read(file, options(request), progress::accept);
     }
 
