@@ -137,8 +137,12 @@ final class ShapeChecks {
                         new Check.Figure("interceptHigh", intercept + interceptReach),
                         new Check.Figure("interceptOffFit", interceptError),
                         new Check.Figure("weighings", line.points)),
-                Finding.of(Code.SHORT_TIME_PASS, ratio),
-                Finding.of(Code.SHORT_TIME_DIFFERS, ratio, interceptError * 100));
+                determined
+                        ? Finding.of(Code.SHORT_TIME_PASS, ratio)
+                        : Finding.of(Code.SHORT_TIME_SLOPE_PASS, Math.sqrt(ratio)),
+                determined
+                        ? Finding.of(Code.SHORT_TIME_DIFFERS, ratio, interceptError * 100)
+                        : Finding.of(Code.SHORT_TIME_SLOPE_DIFFERS, Math.sqrt(ratio), interceptError * 100));
     }
 
     private Evidence halfTime() {

@@ -29,6 +29,7 @@ final class CouponText {
     private static final int ERROR = 17;
     private static final int VERDICT = 13;
     private static final double PERCENT = 100;
+    private static final double FAR_TOO_LARGE = 100;
 
     private final Assessment assessment;
     private final TextLines lines;
@@ -130,7 +131,7 @@ final class CouponText {
 
     private static String limit(double value, double error) {
         // an interval that is open on a side goes with an error too large to round by
-        return error > 0 && error < Math.abs(value)
+        return error > 0 && error < FAR_TOO_LARGE * Math.abs(value)
                 ? Numbers.toUncertainty(value, error)
                 : Numbers.significant(value, 3);
     }
