@@ -19,7 +19,8 @@ public final class Scientific {
         if (!(uncertainty > 0) || !Double.isFinite(uncertainty)) {
             return withPower(Numbers.significant(value, 4));
         }
-        int exponent = exponent(value);
+        // a value lost in its uncertainty has no power of ten of its own
+        int exponent = exponent(Math.max(Math.abs(value), uncertainty));
         double scale = Math.pow(10, -exponent);
         return rounded(value * scale, decimals(uncertainty * scale)) + power(exponent);
     }
@@ -37,7 +38,7 @@ public final class Scientific {
         }
         double a = low.getAsDouble();
         double b = high.getAsDouble();
-        int exponent = exponent(value);
+        int exponent = exponent(Math.max(Math.abs(value), (b - a) / 2));
         double scale = Math.pow(10, -exponent);
         int decimals = decimals((b - a) / 2 * scale);
         String limits = rounded(a * scale, decimals) + " … " + rounded(b * scale, decimals);

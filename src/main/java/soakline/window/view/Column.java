@@ -1,6 +1,7 @@
 package soakline.window.view;
 
 import java.awt.Component;
+import java.awt.Container;
 import java.awt.Dimension;
 import java.awt.Rectangle;
 import javax.swing.JPanel;
@@ -18,6 +19,21 @@ class Column extends JPanel implements Scrollable {
 
     void put(Component part, String constraints) {
         add(part, Look.scaled(constraints));
+    }
+
+    /** Lays out once more, now that the texts know how wide they are: their heights follow from it. */
+    void settle() {
+        invalidateAll(this);
+        revalidate();
+    }
+
+    private static void invalidateAll(Container container) {
+        for (Component part : container.getComponents()) {
+            if (part instanceof Container inner) {
+                invalidateAll(inner);
+            }
+            part.invalidate();
+        }
     }
 
     @Override

@@ -50,7 +50,10 @@ final class FindingsView extends JPanel {
         rows(column, "Coupon", findings.coupon());
         scroll.setViewportView(column);
         scroll.getViewport().setBackground(Look.paper());
-        SwingUtilities.invokeLater(() -> scroll.getVerticalScrollBar().setValue(0));
+        SwingUtilities.invokeLater(() -> {
+            column.settle();
+            scroll.getVerticalScrollBar().setValue(0);
+        });
     }
 
     private static void headline(Column column, Headline headline) {
