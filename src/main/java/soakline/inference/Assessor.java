@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.Supplier;
 import soakline.estimate.Estimate;
 import soakline.estimate.EstimationTask;
 import soakline.estimate.Estimator;
@@ -115,8 +116,9 @@ public final class Assessor {
             }
             return checks;
         }
-        List<Evidence> evidence = new ArrayList<>(shape.all());
-        evidence.addAll(new ResidualChecks(space).all());
+        List<Evidence> evidence = new ArrayList<>();
+        Side.<List<Evidence>>bySide(space.size(), List.of(shape::all, new ResidualChecks(space)::all))
+                .forEach(evidence::addAll);
         checks.addAll(Evidence.judge(evidence));
         checks.add(identifiability.plateau(space.estimate()));
         checks.sort(Comparator.comparing(Check::name));
@@ -125,13 +127,14 @@ public final class Assessor {
 
     private static List<ParameterResult> parameters(Estimate estimate, AssessmentOptions options) {
         EstimationTask task = estimate.task();
-        List<ParameterResult> results = new ArrayList<>();
+        List<Supplier<ParameterResult>> results = new ArrayList<>();
         for (int i = 0; i < task.shapeCount(); i++) {
-            results.add(result(estimate, i, options));
+            int shape = i;
+            results.add(() -> result(estimate, shape, options));
         }
-        results.add(result(estimate, task.levelIndex(), options));
-        results.add(result(estimate, task.startIndex(), options));
-        return results;
+        results.add(() -> result(estimate, task.levelIndex(), options));
+        results.add(() -> result(estimate, task.startIndex(), options));
+        return Side.bySide(task.data().size(), results);
     }
 
     private static ParameterResult result(Estimate estimate, int parameter, AssessmentOptions options) {

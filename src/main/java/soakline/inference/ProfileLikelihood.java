@@ -22,6 +22,7 @@ final class ProfileLikelihood {
     private static final double FARTHEST_CONTENT = 1e4;
 
     private static final double RELATIVE_ACCURACY = 1e-7;
+    private static final double NEARLY = 1e-5;
     private static final int MOST_REFITS = 80;
 
     private final Estimate estimate;
@@ -61,6 +62,9 @@ final class ProfileLikelihood {
             if (next == null) {
                 return OptionalDouble.empty();
             }
+            if (Math.abs(next.root - quantile) < NEARLY * quantile) {
+                return OptionalDouble.of(x - (next.root - quantile) * (x - best) / next.root);
+            }
             if (next.root >= quantile) {
                 outside = next;
             } else {
@@ -69,9 +73,10 @@ final class ProfileLikelihood {
                 if (step >= farthest) {
                     return OptionalDouble.empty();
                 }
-                // almost there: a little beyond the straight line; far from it: on by doubling
-                double growth = next.root > 0 ? 1.02 * quantile / next.root : 2;
-                step = Math.min(farthest, step * Math.max(1.02, Math.min(2, growth)));
+                // far from it on by doubling, near it a little beyond the straight line, very near it on the line
+                // itself
+                double growth = next.root > 0 ? quantile / next.root : 2;
+                step = Math.min(farthest, step * Math.min(2, growth > 1.01 ? 1.02 * growth : growth));
             }
         }
         return OptionalDouble.of(between(inside, outside, quantile, refits));
@@ -97,8 +102,9 @@ final class ProfileLikelihood {
                 return x;
             }
             double value = next.root - quantile;
-            if (Math.abs(value) < 1e-9 * quantile) {
-                return x;
+            if (Math.abs(value) < NEARLY * quantile) {
+                // the chord from the optimum is good enough for what is left
+                return x - value * (x - best) / next.root;
             }
             if (value < 0) {
                 above = lastSide == -1 ? above / 2 : outside.root - quantile;

@@ -13,8 +13,8 @@ final class ResidualChecks {
     /** Up to this many residuals the number of runs has its exact distribution, beyond it the normal one. */
     private static final int EXACT_RUNS = 200;
 
-    /** Longer series are thinned to this for the normality check, which would otherwise see their rounding. */
-    private static final int NORMALITY_MOST = 5000;
+    /** Longer series are thinned to this where signs and shapes are looked at, which would otherwise see their rounding. */
+    private static final int MOST = 5000;
 
     private static final int LEAST_DEGREES = 3;
 
@@ -25,7 +25,7 @@ final class ResidualChecks {
     }
 
     List<Evidence> all() {
-        return List.of(runs(), autocorrelation(), normality(), largest());
+        return Side.bySide(space.size(), List.of(this::runs, this::autocorrelation, this::normality, this::largest));
     }
 
     private Evidence runs() {
@@ -33,8 +33,9 @@ final class ResidualChecks {
         int negative = 0;
         int runs = 0;
         int lastSign = 0;
-        for (int i = 0; i < space.size(); i++) {
-            int sign = (int) Math.signum(space.residual(i));
+        int taken = Math.min(space.size(), MOST);
+        for (int k = 0; k < taken; k++) {
+            int sign = (int) Math.signum(space.residual(thinned(k, taken)));
             if (sign == 0) {
                 continue;
             }
@@ -111,11 +112,10 @@ final class ResidualChecks {
         if (space.degreesOfFreedom() < LEAST_DEGREES) {
             return Evidence.unknown(CheckName.RESIDUAL_NORMALITY, "too few weighings");
         }
-        int n = space.size();
-        int taken = Math.min(n, NORMALITY_MOST);
+        int taken = Math.min(space.size(), MOST);
         double[] standardised = new double[taken];
         for (int k = 0; k < taken; k++) {
-            int i = (int) ((long) k * n / taken);
+            int i = thinned(k, taken);
             standardised[k] = space.residual(i)
                     / (space.standardDeviation() * Math.sqrt(Math.max(1e-12, space.residualVariance(i))));
         }
@@ -128,6 +128,11 @@ final class ResidualChecks {
                 List.of(new Check.Figure("andersonDarling", statistic)),
                 Finding.of(Code.NORMALITY_PASS, statistic),
                 Finding.of(Code.NORMALITY_DIFFERS, statistic));
+    }
+
+    /** The k-th of some weighings spread evenly over all. */
+    private int thinned(int k, int taken) {
+        return (int) ((long) k * space.size() / taken);
     }
 
     /**

@@ -1,6 +1,5 @@
 package soakline.inference;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -56,20 +55,18 @@ final class ShapeChecks {
     }
 
     List<Evidence> all() {
-        List<Evidence> evidence = new ArrayList<>();
-        evidence.add(shortTime());
-        if (determined) {
-            evidence.add(halfTime());
-            evidence.add(lateTime());
-            evidence.add(meanTime());
-        } else {
+        if (!determined) {
             String why = "the test stopped before its plateau";
-            evidence.add(Evidence.unknown(CheckName.HALF_TIME, why));
-            evidence.add(Evidence.unknown(CheckName.LATE_TIME_SLOPE, why));
-            evidence.add(Evidence.unknown(CheckName.MEAN_TIME, why));
+            return List.of(
+                    shortTime(),
+                    Evidence.unknown(CheckName.HALF_TIME, why),
+                    Evidence.unknown(CheckName.LATE_TIME_SLOPE, why),
+                    Evidence.unknown(CheckName.MEAN_TIME, why),
+                    timeExponent());
         }
-        evidence.add(timeExponent());
-        return evidence;
+        return Side.bySide(
+                space.size(),
+                List.of(this::shortTime, this::halfTime, this::lateTime, this::meanTime, this::timeExponent));
     }
 
     /** The straight line through the early weighings, for the chart; empty when there are too few. */
