@@ -60,6 +60,18 @@ public final class Estimator {
         return better ? limit : estimate;
     }
 
+    /** As {@link #refit}, from start values that are all but the optimum, as along a profile: a few undamped steps, if they will do. */
+    public static Estimate refitFromClose(EstimationTask task, double[] start) {
+        if (task.form() == LevelForm.EQUILIBRIUM) {
+            ContentResiduals residuals = new ContentResiduals(task);
+            Estimate close = estimate(task, residuals, LevenbergMarquardt.refine(residuals, task.reduce(start)));
+            if (close.isOptimum()) {
+                return close;
+            }
+        }
+        return refit(task, start);
+    }
+
     /** ln of a D so small that content follows the root of time to five digits up to the last weighing. */
     private static double rootLawDiffusivity(EstimationTask task) {
         double[] unit = new double[task.shapeCount()];
@@ -72,7 +84,11 @@ public final class Estimator {
 
     private static Estimate descend(EstimationTask task, double[] start) {
         ContentResiduals residuals = new ContentResiduals(task);
-        LevenbergMarquardt.Solution solution = LevenbergMarquardt.solve(residuals, task.reduce(start));
+        return estimate(task, residuals, LevenbergMarquardt.solve(residuals, task.reduce(start)));
+    }
+
+    private static Estimate estimate(
+            EstimationTask task, ContentResiduals residuals, LevenbergMarquardt.Solution solution) {
         int free = task.free().length;
         int degreesOfFreedom = task.data().size() - free;
         // data on the curve to the last digit still carry the rounding of their digits

@@ -109,6 +109,11 @@ public final class LevenbergMarquardt {
         return best;
     }
 
+    /** Undamped steps alone, from a start that is all but the optimum; the ending says whether it was. */
+    static Solution refine(ResidualModel model, double[] start) {
+        return polish(new ReducedProblem(model, start, MOST_EVALUATIONS_OF_LOG), start.clone());
+    }
+
     private static Solution solve(ReducedProblem problem, LevenbergMarquardtOptimizer optimiser) {
         double[] point;
         try {

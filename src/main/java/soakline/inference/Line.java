@@ -21,43 +21,48 @@ final class Line {
         this.last = last;
     }
 
+    /**
+     * @param member which weighings take part: a stretch without a gap, as they are in order of time
+     */
     static Line of(ResidualSpace space, IntPredicate member, IntToDoubleFunction weight, IntToDoubleFunction abscissa) {
         int n = space.size();
-        int points = 0;
+        int from = 0;
+        while (from < n && !member.test(from)) {
+            from++;
+        }
+        int to = from;
+        while (to < n && member.test(to)) {
+            to++;
+        }
+        int points = to - from;
+        if (points < LEAST_POINTS) {
+            return null;
+        }
+        double[] x = new double[points];
+        double[] w = new double[points];
         double weights = 0;
         double mean = 0;
-        double first = Double.NaN;
-        double last = Double.NaN;
-        for (int i = 0; i < n; i++) {
-            if (member.test(i)) {
-                double w = weight.applyAsDouble(i);
-                weights += w;
-                mean += w * abscissa.applyAsDouble(i);
-                first = points == 0 ? space.time(i) : first;
-                last = space.time(i);
-                points++;
-            }
+        for (int i = 0; i < points; i++) {
+            x[i] = abscissa.applyAsDouble(from + i);
+            w[i] = weight.applyAsDouble(from + i);
+            weights += w[i];
+            mean += w[i] * x[i];
         }
         mean /= weights;
         double spread = 0;
-        for (int i = 0; i < n; i++) {
-            if (member.test(i)) {
-                double x = abscissa.applyAsDouble(i) - mean;
-                spread += weight.applyAsDouble(i) * x * x;
-            }
+        for (int i = 0; i < points; i++) {
+            x[i] -= mean;
+            spread += w[i] * x[i] * x[i];
         }
-        if (points < LEAST_POINTS || !(spread > 0)) {
+        if (!(spread > 0)) {
             return null;
         }
         double[] slope = new double[n];
         double[] intercept = new double[n];
-        for (int i = 0; i < n; i++) {
-            if (member.test(i)) {
-                double w = weight.applyAsDouble(i);
-                slope[i] = w * (abscissa.applyAsDouble(i) - mean) / spread;
-                intercept[i] = w / weights - mean * slope[i];
-            }
+        for (int i = 0; i < points; i++) {
+            slope[from + i] = w[i] * x[i] / spread;
+            intercept[from + i] = w[i] / weights - mean * slope[from + i];
         }
-        return new Line(slope, intercept, points, first, last);
+        return new Line(slope, intercept, points, space.time(from), space.time(to - 1));
     }
 }

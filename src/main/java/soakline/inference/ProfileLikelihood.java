@@ -135,7 +135,7 @@ final class ProfileLikelihood {
             start[i] = b.working[i] + slope * (x - b.x);
         }
         EstimationTask held = task.withFixed(parameter, x);
-        Estimate refit = Estimator.refit(held, start);
+        Estimate refit = Estimator.refitFromClose(held, start);
         if (!refit.isOptimum()) {
             refit = Estimator.estimate(held);
         }
