@@ -128,6 +128,17 @@ class WholeCommandTest {
     }
 
     @ParameterizedTest
+    @ValueSource(strings = {"text", "csv", "json"})
+    void theTestThatStoppedEarlySpeaksOfNoFittedDiffusivity(String format) {
+        run("estimate", "sample-runs/04-stopped-early.csv", "--format", format);
+
+        assertThat(out() + err())
+                .doesNotContain("fitted D")
+                .doesNotContain("D holds")
+                .doesNotContain("value is an apparent D");
+    }
+
+    @ParameterizedTest
     @ValueSource(strings = {"text", "csv"})
     void theTestThatStoppedEarlyGivesNoDiffusivity(String format) {
         assertThat(run("estimate", "sample-runs/04-stopped-early.csv", "--format", format))

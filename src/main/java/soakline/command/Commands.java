@@ -19,7 +19,7 @@ public final class Commands {
     private static final String ESTIMATE = "estimate";
     static final String PROGRAM = "java -jar soakline.jar";
     private static final String HELP = """
-            Usage: soakline [COMMAND]
+            Usage: java -jar soakline.jar [COMMAND]
             Diffusivity and equilibrium content of flat coupons, with an honest uncertainty, from weighings.
 
             Commands:
@@ -29,7 +29,7 @@ public final class Commands {
               -h, --help       shows this and ends; "estimate --help" shows the options of the command
                   --version    shows the version and ends
 
-            Without a command the window opens.
+            Without a command the window opens; without a display, the first sample run is estimated.
             Exit status: 0 done; 1 done, but a result is not usable; 2 wrong use; 3 unusable input.
             """;
 

@@ -34,7 +34,7 @@ final class EstimateOptions {
 
     static final List<Option> ALL = List.of(
             once(THICKNESS, "QUANTITY", "thickness of the coupon, such as \"2.03 mm\"; never assumed"),
-            once(FACES, "both|one", "which large faces are exposed; never assumed: D differs by a factor of 4"),
+            once(FACES, "both|one", "which large faces are exposed; never assumed: it changes D by 4"),
             once(EDGES, "bare|sealed", "the four edges; sealed when nothing is said"),
             once(WIDTH, "QUANTITY", "width of the coupon; needed with bare edges"),
             once(LENGTH, "QUANTITY", "length of the coupon; needed with bare edges"),
@@ -62,6 +62,7 @@ final class EstimateOptions {
             "Options hold in place of what a file says. Quantities carry their unit, with a decimal point or",
             "comma; \"2.03 mm ± 0.01 mm\" (or +/-) also gives the standard uncertainty.",
             "Results go to standard output, notes and problems to standard error.",
+            "Example: " + Commands.PROGRAM + " estimate run.csv --thickness \"2.03 mm\" --faces both",
             "Exit status: 0 done; 1 done, but a result is not usable; 2 wrong use; 3 unusable input.");
 
     private EstimateOptions() {}

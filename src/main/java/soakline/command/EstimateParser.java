@@ -54,6 +54,7 @@ final class EstimateParser {
     private static CommandSpec spec() {
         CommandSpec spec = CommandSpec.create().name("soakline estimate");
         spec.usageMessage()
+                .customSynopsis(Commands.PROGRAM + " estimate FILE... [OPTION]...")
                 .description(EstimateOptions.DESCRIPTION + "%n")
                 .sortOptions(false)
                 .width(EstimateOptions.WIDTH_OF_HELP)

@@ -89,7 +89,7 @@ public final class Assessor {
                 FickianVerdict.finding(fickian),
                 problems,
                 Plausibility.notes(run),
-                Cautions.of(direction, fickian));
+                Cautions.of(direction));
     }
 
     private static EstimationTask task(Run run, Sheet sheet, AssessmentOptions options) {
@@ -215,6 +215,6 @@ public final class Assessor {
                 FickianVerdict.finding(Verdict.UNKNOWN),
                 problems,
                 Plausibility.notes(run),
-                Cautions.of(direction, Verdict.UNKNOWN));
+                Cautions.of(direction));
     }
 }

@@ -10,12 +10,9 @@ final class Cautions {
 
     private Cautions() {}
 
-    static List<Finding> of(Direction direction, Verdict fickian) {
+    static List<Finding> of(Direction direction) {
         List<Finding> cautions = new ArrayList<>();
         cautions.add(Finding.of(Code.CAUTION_APPARENT));
-        if (fickian == Verdict.FAIL) {
-            cautions.add(Finding.of(Code.CAUTION_NOT_FICKIAN));
-        }
         if (direction == Direction.DRYING) {
             cautions.add(Finding.of(Code.CAUTION_OVEN));
             cautions.add(Finding.of(Code.CAUTION_DRYING_CHANGES));

@@ -123,7 +123,7 @@ final class ShapeChecks {
         return new Evidence(
                 CheckName.SHORT_TIME_SLOPE,
                 classic,
-                OptionalDouble.of(ratio),
+                OptionalDouble.of(determined ? ratio : Math.sqrt(ratio)),
                 eitherOf(space.probability(line.slope), space.probability(line.intercept)),
                 List.of(
                         new Check.Figure("slope", slope),

@@ -113,7 +113,6 @@ public enum Code {
 
     // ---- cautions: safety and use ----
     CAUTION_APPARENT(Kind.CAUTION),
-    CAUTION_NOT_FICKIAN(Kind.CAUTION),
     CAUTION_OVEN(Kind.CAUTION),
     CAUTION_DRYING_CHANGES(Kind.CAUTION),
     CAUTION_TRAPPED_MOISTURE(Kind.CAUTION),

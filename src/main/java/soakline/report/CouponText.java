@@ -68,7 +68,7 @@ final class CouponText {
         facts.dryMass().ifPresent(q -> known.add("dry mass " + q));
         facts.balance().ifPresent(q -> known.add("balance " + q));
         facts.other().forEach(o -> known.add(o.name() + " " + o.value()));
-        lines.wrapped("  ", String.join(", ", known));
+        lines.listed("  ", known);
         facts.note().ifPresent(n -> lines.wrapped("  note: ", n));
     }
 
@@ -76,8 +76,7 @@ final class CouponText {
         String usable = assessment.usable() ? "usable" : "NOT USABLE";
         String determined = assessment.determined() ? "" : " D is not determined.";
         lines.blank();
-        lines.wrapped(
-                "  Result: ", usable + "." + determined + " " + Wording.sentence(assessment.fickianFinding()) + ".");
+        lines.wrapped("  Result: ", usable + "." + determined + " " + Wording.text(assessment.fickianFinding()));
     }
 
     private void parameters() {
@@ -181,7 +180,7 @@ final class CouponText {
         lines.line("  Checks");
         for (Check check : assessment.checks()) {
             StringBuilder words = new StringBuilder(check.name().words());
-            words.append(": ").append(Wording.sentence(check.finding())).append('.');
+            words.append(": ").append(Wording.text(check.finding()));
             if (assessment.determined() && check.diffusivity().isPresent()) {
                 words.append(classic(check));
             }
@@ -209,7 +208,7 @@ final class CouponText {
         lines.blank();
         lines.line("  " + head);
         for (Finding finding : findings) {
-            lines.wrapped("    - ", Wording.withPlace(finding) + ".");
+            lines.wrapped("    - ", Wording.text(finding));
         }
     }
 

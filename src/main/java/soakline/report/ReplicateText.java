@@ -34,7 +34,7 @@ final class ReplicateText {
                     + spread.number());
         }
         if (!replicates.differences().isEmpty()) {
-            lines.wrapped("  ", Wording.sentence(ReplicateWords.unlike(replicates.differences())) + ".");
+            lines.wrapped("  ", Wording.text(ReplicateWords.unlike(replicates.differences())));
         }
     }
 }

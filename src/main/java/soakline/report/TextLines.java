@@ -29,11 +29,24 @@ final class TextLines {
     }
 
     /** A text broken between words; the lines after the first are set in under its beginning. */
-    TextLines wrapped(String first, String words) {
+    TextLines wrapped(String first, String text) {
+        return wrapped(first, words(clean(text)));
+    }
+
+    /** Items with commas between them, broken between items, so that a number keeps its unit. */
+    TextLines listed(String first, List<String> items) {
+        List<String> pieces = new ArrayList<>();
+        for (int i = 0; i < items.size(); i++) {
+            pieces.add(clean(items.get(i)) + (i + 1 < items.size() ? "," : ""));
+        }
+        return wrapped(first, pieces);
+    }
+
+    private TextLines wrapped(String first, List<String> pieces) {
         String indent = " ".repeat(first.length());
         StringBuilder line = new StringBuilder(first);
         boolean empty = true;
-        for (String word : words(clean(words))) {
+        for (String word : pieces) {
             if (!empty && line.length() + 1 + word.length() > WIDTH) {
                 line(line.toString());
                 line.setLength(0);

@@ -28,7 +28,12 @@ public final class Wording {
         return place.isEmpty() ? sentence(finding) : place + ": " + sentence(finding);
     }
 
-    /** The sentence without its place. */
+    /** The sentence with its place in front and a full stop behind, as it stands in running text. */
+    public static String text(Finding finding) {
+        return withPlace(finding) + ".";
+    }
+
+    /** The sentence without its place and without a full stop. */
     public static String sentence(Finding finding) {
         return fill(template(finding.code()), finding.values());
     }

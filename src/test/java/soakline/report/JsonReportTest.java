@@ -47,7 +47,7 @@ class JsonReportTest {
         assertThat(coupon.get("direction").asText()).isEqualTo("uptake");
         assertThat(coupon.get("usable").isBoolean()).isTrue();
         assertThat(coupon.get("problems")).isEmpty();
-        assertThat(coupon.get("cautions").get(0).asText()).startsWith("D holds for this temperature");
+        assertThat(coupon.get("cautions").get(0).asText()).startsWith("The result holds for this temperature");
         assertThat(keys(coupon.get("fickian"))).containsExactly("verdict", "text");
     }
 

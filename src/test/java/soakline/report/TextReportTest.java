@@ -73,6 +73,13 @@ class TextReportTest {
     }
 
     @Test
+    void factsAreBrokenBetweenThemAndNotWithin() {
+        TextLines lines = new TextLines().listed("  ", List.of("x".repeat(80), "length 100.000 mm"));
+
+        assertThat(lines.toString()).isEqualTo("  " + "x".repeat(80) + ",\n  length 100.000 mm\n");
+    }
+
+    @Test
     void severalCouponsEndInMeanSpreadAndNumber() {
         String text = text(
                 InventedAssessments.usable("A", 1e-12),

@@ -72,7 +72,7 @@ public record FactsAnswer(Map<Field, String> texts, Optional<Faces> faces, boole
         }
         if (question.faces()) {
             if (faces.isEmpty()) {
-                complaints.put(Field.FACES, Wording.sentence(Finding.of(Code.FACES_NOT_CHOSEN)));
+                complaints.put(Field.FACES, Wording.text(Finding.of(Code.FACES_NOT_CHOSEN)));
             } else {
                 facts = facts.withFaces(faces.get());
             }
@@ -94,9 +94,9 @@ public record FactsAnswer(Map<Field, String> texts, Optional<Faces> faces, boole
             if (quantity.si() > 0) {
                 return Optional.of(quantity);
             }
-            complaints.put(field, Wording.sentence(Finding.of(Code.FACT_NOT_POSITIVE, capital(field), text)));
+            complaints.put(field, Wording.text(Finding.of(Code.FACT_NOT_POSITIVE, capital(field), text)));
         } catch (QuantityFormatException e) {
-            complaints.put(field, Wording.sentence(complaint(field, text, e)));
+            complaints.put(field, Wording.text(complaint(field, text, e)));
         }
         return Optional.empty();
     }

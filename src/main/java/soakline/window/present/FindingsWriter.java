@@ -53,16 +53,16 @@ final class FindingsWriter {
     }
 
     private static List<String> sentences(List<Finding> findings) {
-        return findings.stream().map(Wording::withPlace).toList();
+        return findings.stream().map(Wording::text).toList();
     }
 
     private Headline headline() {
         Optional<ParameterResult> d =
                 assessment.parameter("diffusivity").filter(p -> p.value().isPresent());
         if (!assessment.determined() || d.isEmpty()) {
-            return new Headline(Verdict.FAIL, "D not determined", "No diffusivity can be given from these weighings");
+            return new Headline(Verdict.FAIL, "D not determined", "No diffusivity can be given from these weighings.");
         }
-        String fickian = Wording.sentence(assessment.fickianFinding());
+        String fickian = Wording.text(assessment.fickianFinding());
         return new Headline(assessment.fickian(), symbol() + " = " + valueWithUnit(d.get()), fickian);
     }
 
@@ -100,15 +100,15 @@ final class FindingsWriter {
         return switch (parameter) {
             case "diffusivity" -> assessment.isApparent() ? "apparent D" : "D, diffusivity";
             case "equilibriumContent" -> "M∞, equilibrium";
-            case "startContent" -> "M₀, start";
+            case "startContent" -> "M0, start";
             case "initialSlope" -> "initial slope";
             default -> parameter;
         };
     }
 
-    private static Row combined(CombinedUncertainty combined, ParameterResult d) {
+    private Row combined(CombinedUncertainty combined, ParameterResult d) {
         double value = d.value().orElse(0);
-        return new Row("D, with lengths", "", Scientific.interval(value, combined.low(), combined.high()));
+        return new Row(symbol() + ", combined", "", Scientific.interval(value, combined.low(), combined.high()));
     }
 
     private static String valueWithUnit(ParameterResult result) {
@@ -140,8 +140,8 @@ final class FindingsWriter {
         return assessment
                 .combined()
                 .map(c -> c.contributions().stream()
-                        .map(s -> s.source() + " " + Math.round(s.share() * PERCENT) + " %")
-                        .collect(Collectors.joining(", ", "Variance of D: ", "")))
+                        .map(s -> s.source() + " " + Numbers.significant(s.share() * PERCENT, 2) + " %")
+                        .collect(Collectors.joining(", ", "Combined variance of D: ", "")))
                 .orElse("");
     }
 
@@ -158,7 +158,7 @@ final class FindingsWriter {
                 check.verdict(),
                 word(check.verdict()),
                 capital(check.name().words()),
-                Wording.sentence(check.finding()),
+                Wording.text(check.finding()),
                 detail);
     }
 

@@ -28,18 +28,18 @@ public record Question(String coupon, boolean thickness, boolean faces, boolean 
     }
 
     public String introduction() {
-        return Wording.sentence(Finding.of(Code.ASK_FACTS));
+        return Wording.text(Finding.of(Code.ASK_FACTS));
     }
 
     public String thicknessHelp() {
-        return Wording.sentence(Finding.of(Code.ASK_THICKNESS));
+        return Wording.text(Finding.of(Code.ASK_THICKNESS));
     }
 
     public String facesHelp() {
-        return Wording.sentence(Finding.of(Code.ASK_FACES));
+        return Wording.text(Finding.of(Code.ASK_FACES));
     }
 
     public String sizeHelp() {
-        return Wording.sentence(Finding.of(Code.ASK_SIZE));
+        return Wording.text(Finding.of(Code.ASK_SIZE));
     }
 }

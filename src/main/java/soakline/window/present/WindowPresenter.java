@@ -71,7 +71,7 @@ public final class WindowPresenter {
         if (files.size() == 1) {
             open(files.get(0));
         } else if (!files.isEmpty()) {
-            show(state.withMessage(Wording.sentence(Finding.of(Code.DROP_ONE_FILE, files.size()))));
+            show(state.withMessage(Wording.text(Finding.of(Code.DROP_ONE_FILE, files.size()))));
         }
     }
 
@@ -186,7 +186,7 @@ public final class WindowPresenter {
 
             @Override
             public void cancelled() {
-                String text = Wording.sentence(Finding.of(Code.WAIT_CANCELLED));
+                String text = Wording.text(Finding.of(Code.WAIT_CANCELLED));
                 show(afterNoResult(estimating, what, text).withMessage(text).withoutWaiting());
             }
         });
@@ -214,7 +214,7 @@ public final class WindowPresenter {
                         Code.UNEXPECTED,
                         Optional.ofNullable(reason.getMessage())
                                 .orElse(reason.getClass().getSimpleName()));
-        return Wording.withPlace(finding);
+        return Wording.text(finding);
     }
 
     private static String status(Run run) {

@@ -30,7 +30,7 @@ final class MainWindow {
     private static final Dimension USUAL_SIZE = new Dimension(1400, 900);
     private static final Dimension LEAST_SIZE = new Dimension(640, 480);
     /** Digits side by side: the table of parameters must fit whatever the font. */
-    private static final int FINDINGS_DIGITS = 56;
+    private static final int FINDINGS_DIGITS = 58;
 
     private final JFrame frame = new JFrame("Soakline");
     private final WindowPreferences preferences;

@@ -37,13 +37,13 @@ final class WelcomeView extends JPanel {
         Column page = new Column("insets #56 #32 #32 #32, wrap 1, gapy #12", "[grow, center]", "");
         Column column = new Column("insets 0, wrap 1, gapy #14", "[grow, fill, 0::]", "");
         column.put(new WrappingText("Soakline", "h00.font", "Label.foreground"), "growx, wmin 0");
-        column.put(WrappingText.plain(Wording.sentence(Finding.of(Code.WELCOME_OPEN))), "growx, wmin 0");
+        column.put(WrappingText.plain(Wording.text(Finding.of(Code.WELCOME_OPEN))), "growx, wmin 0");
         JButton button = new JButton(open);
         button.setName("welcome-open");
         button.putClientProperty("FlatLaf.style", Look.MAIN_BUTTON);
         column.put(button, "grow 0, gapbottom #14");
         if (!welcome.samples().isEmpty()) {
-            column.put(WrappingText.plain(Wording.sentence(Finding.of(Code.WELCOME_SAMPLES))), "growx, wmin 0");
+            column.put(WrappingText.plain(Wording.text(Finding.of(Code.WELCOME_SAMPLES))), "growx, wmin 0");
             Column samples = new Column("insets 0, wrap 2, gap #10", "[grow, fill, sg, 0::][grow, fill, sg, 0::]", "");
             for (Sample sample : welcome.samples()) {
                 samples.put(button(sample), "growx, wmin 0");

@@ -42,7 +42,7 @@ class WindowPresenterTest {
         Findings findings = findings();
         assertThat(findings.headline().verdict()).isEqualTo(Verdict.PASS);
         assertThat(findings.headline().large()).matches("D = \\d\\.\\d+×10⁻¹[²³] m²/s");
-        assertThat(findings.parameters()).extracting(Findings.Row::name).contains("D, diffusivity", "D, with lengths");
+        assertThat(findings.parameters()).extracting(Findings.Row::name).contains("D, diffusivity", "D, combined");
         assertThat(findings.checks())
                 .hasSizeGreaterThan(8)
                 .allMatch(c -> !c.sentence().isEmpty());

@@ -2,6 +2,7 @@ package soakline.window.view;
 
 import java.util.UUID;
 import java.util.concurrent.TimeUnit;
+import java.util.function.Predicate;
 import java.util.prefs.BackingStoreException;
 import java.util.prefs.Preferences;
 import javax.swing.RepaintManager;
@@ -12,6 +13,7 @@ import org.assertj.swing.fixture.FrameFixture;
 import org.assertj.swing.timing.Condition;
 import org.assertj.swing.timing.Pause;
 import org.assertj.swing.timing.Timeout;
+import soakline.window.present.CouponService;
 import soakline.window.present.InventedService;
 import soakline.window.present.WindowState;
 
@@ -25,13 +27,17 @@ final class OpenWindow implements AutoCloseable {
     private final MainWindow window;
 
     OpenWindow(Appearance appearance) {
+        this(appearance, new InventedService());
+    }
+
+    OpenWindow(Appearance appearance, CouponService service) {
         robot = BasicRobot.robotWithNewAwtHierarchy();
         RepaintManager.setCurrentManager(guard);
         window = GuiActionRunner.execute(() -> {
             Look.install(appearance);
             WindowPreferences preferences = new WindowPreferences(node);
             preferences.setAppearance(appearance);
-            MainWindow made = new MainWindow(new InventedService(), new SwingTasks(), preferences);
+            MainWindow made = new MainWindow(service, new SwingTasks(), preferences);
             made.open();
             return made;
         });
@@ -56,13 +62,19 @@ final class OpenWindow implements AutoCloseable {
 
     /** Waits until the window shows content of a kind and no work goes on. */
     void waitFor(Class<? extends WindowState.Content> kind) {
+        waitFor(kind, state -> true);
+    }
+
+    /** Waits, as above, until the state is also one that is wanted. */
+    void waitFor(Class<? extends WindowState.Content> kind, Predicate<WindowState> wanted) {
         Pause.pause(
                 new Condition(kind.getSimpleName()) {
                     @Override
                     public boolean test() {
                         WindowState state = state();
                         return kind.isInstance(state.content())
-                                && state.waiting().isEmpty();
+                                && state.waiting().isEmpty()
+                                && wanted.test(state);
                     }
                 },
                 Timeout.timeout(20, TimeUnit.SECONDS));

@@ -9,23 +9,38 @@ import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import javax.imageio.ImageIO;
 import javax.swing.JComponent;
 import javax.swing.JFrame;
 import org.assertj.swing.edt.GuiActionRunner;
 import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
+import soakline.Samples;
+import soakline.inference.Assessment;
+import soakline.report.FigureFile;
 import soakline.window.present.WindowState.Asking;
 import soakline.window.present.WindowState.Content;
 import soakline.window.present.WindowState.Result;
 import soakline.window.present.WindowState.Welcome;
 
-/** Takes pictures of the window: into the build folder, or where {@code -Dsoakline.pictures} says. */
+/**
+ * Takes pictures of the window and of figures, all from the sample runs, into the build folder; those of the documents also into the
+ * folder that {@code -Dsoakline.pictures} names.
+ */
 class PicturesTest {
 
-    private static final Path FOLDER = Path.of(System.getProperty("soakline.pictures", "target/pictures"));
+    private static final Path FOLDER = Path.of("target", "pictures");
+    private static final Optional<Path> DOCUMENTS =
+            Optional.ofNullable(System.getProperty("soakline.pictures")).map(Path::of);
+
+    @TempDir
+    private Path files;
 
     @BeforeEach
     void display() {
@@ -36,32 +51,82 @@ class PicturesTest {
     @EnumSource(Appearance.class)
     void everyPartOfTheWindow(Appearance appearance) throws Exception {
         String name = appearance.name().toLowerCase(Locale.ROOT);
-        try (OpenWindow open = new OpenWindow(appearance)) {
+        try (OpenWindow open = new OpenWindow(appearance, Samples.service())) {
             resize(open, 1400, 900);
             open.waitFor(Welcome.class);
             take(open, "welcome-" + name);
-            show(open, "01-plateau.csv", Result.class);
-            take(open, "result-" + name);
+            for (String sample : Samples.names()) {
+                GuiActionRunner.execute(() -> open.window().presenter().openSample(sample));
+                waitForFile(open, sample, Result.class);
+                take(open, sample.substring(0, 2) + "-" + name);
+            }
+            GuiActionRunner.execute(() -> open.window().presenter().select(1));
             resize(open, 900, 650);
             take(open, "narrow-" + name);
-            show(open, "02-stopped-early.csv", Result.class);
             resize(open, 1400, 900);
-            take(open, "not-determined-" + name);
-            show(open, "03-second-stage.csv", Result.class);
-            take(open, "apparent-" + name);
-            show(open, "no-facts-several.csv", Asking.class);
-            open.frame().button("estimate").click();
+
+            Path bare = Files.writeString(files.resolve("no-facts.csv"), withoutFacts());
+            GuiActionRunner.execute(() -> open.window().presenter().open(bare));
+            waitForFile(open, "no-facts.csv", Asking.class);
             take(open, "asking-" + name);
-            show(open, "04-several.csv", Result.class);
-            GuiActionRunner.execute(() -> open.window().presenter().open(Path.of("broken.csv")));
+            open.frame().button("estimate").click();
+            take(open, "complaints-" + name);
+
+            GuiActionRunner.execute(() -> open.window().presenter().openSample("01-both-faces.csv"));
+            waitForFile(open, "01-both-faces.csv", Result.class);
+            Path broken = Files.writeString(files.resolve("broken.csv"), "time [h],mass\n0,31.2041\n");
+            GuiActionRunner.execute(() -> open.window().presenter().open(broken));
             open.waitForMessage();
             take(open, "message-" + name);
         }
     }
 
-    private static void show(OpenWindow open, String file, Class<? extends Content> kind) {
-        GuiActionRunner.execute(() -> open.window().presenter().openSample(file));
-        open.waitFor(kind);
+    @Test
+    void theWindowInTheDocuments() throws Exception {
+        try (OpenWindow open = new OpenWindow(Appearance.LIGHT, Samples.service())) {
+            resize(open, 1320, 860);
+            for (String[] picture : List.of(
+                    new String[] {"01-both-faces.csv", "window-light"},
+                    new String[] {"04-stopped-early.csv", "stopped-early"},
+                    new String[] {"07-two-stages.csv", "two-stages"})) {
+                GuiActionRunner.execute(() -> open.window().presenter().openSample(picture[0]));
+                waitForFile(open, picture[0], Result.class);
+                document(open, picture[1]);
+            }
+        }
+        try (OpenWindow open = new OpenWindow(Appearance.DARK, Samples.service())) {
+            resize(open, 1320, 860);
+            GuiActionRunner.execute(() -> open.window().presenter().openSample("02-drying.csv"));
+            waitForFile(open, "02-drying.csv", Result.class);
+            document(open, "window-dark");
+        }
+    }
+
+    @Test
+    void figures() throws IOException {
+        Files.createDirectories(FOLDER);
+        for (String sample : Samples.names()) {
+            List<Assessment> assessments = Samples.assessments(sample);
+            FigureFile.write(FOLDER.resolve("figure-" + sample.substring(0, 2) + ".svg"), assessments);
+            FigureFile.write(FOLDER.resolve("figure-" + sample.substring(0, 2) + ".png"), assessments);
+        }
+        if (DOCUMENTS.isPresent()) {
+            Files.createDirectories(DOCUMENTS.get());
+            FigureFile.write(DOCUMENTS.get().resolve("figure.png"), Samples.assessments("05-bare-edges.csv"));
+        }
+        assertThat(FOLDER.resolve("figure-01.png")).isNotEmptyFile();
+    }
+
+    private static String withoutFacts() throws IOException {
+        StringBuilder text = new StringBuilder();
+        Files.readAllLines(Samples.file("01-both-faces.csv")).stream()
+                .filter(line -> !line.startsWith("#"))
+                .forEach(line -> text.append(line).append('\n'));
+        return text.toString();
+    }
+
+    private static void waitForFile(OpenWindow open, String file, Class<? extends Content> kind) {
+        open.waitFor(kind, state -> state.title().contains(file));
     }
 
     private static void resize(OpenWindow open, int width, int height) {
@@ -69,9 +134,26 @@ class PicturesTest {
         open.frame().robot().waitForIdle();
     }
 
+    private static void document(OpenWindow open, String name) throws IOException {
+        BufferedImage picture = picture(open);
+        write(picture, FOLDER.resolve("document-" + name + ".png"));
+        if (DOCUMENTS.isPresent()) {
+            write(picture, DOCUMENTS.get().resolve(name + ".png"));
+        }
+    }
+
     private static void take(OpenWindow open, String name) throws IOException {
+        write(picture(open), FOLDER.resolve("window-" + name + ".png"));
+    }
+
+    private static void write(BufferedImage picture, Path file) throws IOException {
+        Files.createDirectories(file.getParent());
+        assertThat(ImageIO.write(picture, "png", file.toFile())).isTrue();
+    }
+
+    private static BufferedImage picture(OpenWindow open) {
         open.frame().robot().waitForIdle();
-        BufferedImage image = GuiActionRunner.execute(() -> {
+        return GuiActionRunner.execute(() -> {
             JFrame frame = open.window().frame();
             JComponent root = frame.getRootPane();
             GraphicsConfiguration screen = frame.getGraphicsConfiguration();
@@ -84,9 +166,5 @@ class PicturesTest {
             g.dispose();
             return picture;
         });
-        Files.createDirectories(FOLDER);
-        assertThat(ImageIO.write(
-                        image, "png", FOLDER.resolve("window-" + name + ".png").toFile()))
-                .isTrue();
     }
 }
