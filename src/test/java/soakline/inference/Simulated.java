@@ -2,6 +2,7 @@ package soakline.inference;
 
 import java.util.List;
 import java.util.Random;
+import java.util.stream.Stream;
 import soakline.estimate.Estimate;
 import soakline.estimate.EstimationTask;
 import soakline.estimate.Estimator;
@@ -60,6 +61,13 @@ final class Simulated {
     static Run run(int n, double tau, double correlation, Random random) {
         double[] times = times(n, tau);
         return run(times, contents(times, correlation, random));
+    }
+
+    /** Assessments of so many tests with white noise, all as usual. */
+    static List<Assessment> assessments(int sets, int n, double tau, Random random) {
+        return Stream.generate(() -> Assessor.assess(run(n, tau, 0, random), AssessmentOptions.usual()))
+                .limit(sets)
+                .toList();
     }
 
     static Run run(double[] times, double[] contents) {
