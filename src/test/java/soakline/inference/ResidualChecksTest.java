@@ -26,8 +26,6 @@ import soakline.uptake.FickianModel;
 /** The checks against enumeration, simulation and hand calculation; all seeds fixed. */
 class ResidualChecksTest {
 
-    private static final List<Assessment> WHEN_ALL_IS_RIGHT = Simulated.assessments(1000, 24, 1.5, new Random(1234));
-
     /** Four standard deviations of a count: a right program fails once in 16,000 seeds, and the seed is fixed. */
     private static double fourSigma(double p, int n) {
         return 4 * Math.sqrt(p * (1 - p) / n);
@@ -216,7 +214,7 @@ class ResidualChecksTest {
     }
 
     private static double[] chances(CheckName name) {
-        return WHEN_ALL_IS_RIGHT.stream()
+        return Simulated.assessments().stream()
                 .flatMap(a -> a.checks().stream())
                 .filter(c -> c.name() == name && c.pValue().isPresent())
                 .mapToDouble(c -> c.pValue().getAsDouble())
