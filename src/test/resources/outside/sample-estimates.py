@@ -1,9 +1,10 @@
 # Makes sample-estimates.csv: estimates of sample runs by SciPy, for comparison. D in m2/s, contents in %.
 # Made with Debian's python3-scipy 1.10.1. Run from the top of the repository:
 #   python3 src/test/resources/outside/sample-estimates.py > src/test/resources/outside/sample-estimates.csv
+# The test that stopped early: initial slope of content on the root of time, in % / s^0.5, with ln D and the start content free.
 # Limits: profile likelihood, S(x) = S (1 + F/nu) with F the 95 % point of F(1, nu); standard error of D from that of ln D.
 import numpy as np
-from scipy.optimize import least_squares, brentq
+from scipy.optimize import brentq, least_squares, minimize_scalar
 from scipy.special import erfc
 from scipy.stats import f as fdist
 import scipy
@@ -72,9 +73,45 @@ def run(name, paths, fixed_start=None):
             e = v * e
         print(",".join([name, "" if fixed_start is None else repr(fixed_start), names[k]] + ["%.9g" % x for x in (v, e, low, high)]))
 
+def run_slope(name, L):
+    t, y = read(name)
+    def rises(lnd):
+        """Content per initial slope; the root of time alone where D tends to 0."""
+        if lnd == -np.inf:
+            return np.sqrt(t)
+        return G(np.exp(lnd) * t / L ** 2) / (2 * np.sqrt(np.exp(lnd) / np.pi) / L)
+    def solved(lnd, held={}):
+        """Sum of squares with ln D held, and perhaps slope (1) or start (2); the rest solved linearly."""
+        columns = {1: rises(lnd), 2: np.ones(len(t))}
+        r = y - sum((held[k] * columns[k] for k in held), np.zeros(len(t)))
+        a = np.array([columns[k] for k in (1, 2) if k not in held]).T
+        c = np.linalg.lstsq(a, r, rcond=None)[0]
+        return ((r - a @ c) ** 2).sum(), c
+    def best(held={}):
+        grid = np.linspace(np.log(1e-15), np.log(1e-11), 200)
+        i = int(np.argmin([solved(x, held)[0] for x in grid]))
+        far = solved(-np.inf, held)[0]
+        if 0 < i < len(grid) - 1:
+            r = minimize_scalar(lambda x: solved(x, held)[0], bracket=tuple(grid[i - 1:i + 2]), options=dict(xtol=1e-12))
+            if r.fun < far:
+                return r.fun, r.x
+        return far, -np.inf
+    lnd = best()[1]
+    p = np.array([lnd, *solved(lnd)[1]])
+    r = least_squares(lambda q: q[2] + q[1] * rises(q[0]) - y, p, xtol=1e-15, ftol=1e-15, gtol=1e-15, x_scale="jac", jac="3-point")
+    p, S, nu = r.x, 2 * r.cost, len(y) - 3
+    scale = np.linalg.norm(r.jac, axis=0)
+    se = np.sqrt(np.diag(np.linalg.inv((r.jac / scale).T @ (r.jac / scale))) * S / nu) / scale
+    target = S * (1 + fdist.ppf(0.95, 1, nu) / nu)
+    for k, title in ((1, "initialSlope"), (2, "startContent")):
+        g = lambda x: best({k: x})[0] - target
+        row = (p[k], se[k], brentq(g, p[k] - 8 * se[k], p[k], xtol=1e-13), brentq(g, p[k], p[k] + 8 * se[k], xtol=1e-13))
+        print(",".join([name, "", title] + ["%.9g" % x for x in row]))
+
 print("# Source: SciPy %s, recipe in sample-estimates.py." % scipy.__version__)
 print("file,fixedStart,parameter,value,standardError,low,high")
 run("01-both-faces.csv", [2.03e-3 / 2])
 run("01-both-faces.csv", [2.03e-3 / 2], 0.0)
 run("02-drying.csv", [1.52e-3 / 2])
 run("05-bare-edges.csv", [4e-3 / 2, 20e-3 / 2, 20e-3 / 2])
+run_slope("04-stopped-early.csv", 3.10e-3 / 2)

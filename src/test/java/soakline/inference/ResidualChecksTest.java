@@ -3,19 +3,25 @@ package soakline.inference;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Random;
+import org.apache.commons.math3.distribution.TDistribution;
 import org.apache.commons.math3.distribution.UniformRealDistribution;
 import org.apache.commons.math3.stat.inference.KolmogorovSmirnovTest;
+import org.apache.commons.math3.stat.regression.OLSMultipleLinearRegression;
 import org.apache.commons.math3.util.CombinatoricsUtils;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import soakline.estimate.Estimate;
+import soakline.estimate.EstimationTask;
+import soakline.estimate.Estimator;
+import soakline.specimen.ContentSeries;
+import soakline.uptake.FickianModel;
 
 /** The checks against enumeration, simulation and hand calculation; all seeds fixed. */
 class ResidualChecksTest {
@@ -46,6 +52,14 @@ class ResidualChecksTest {
                 }
             }
         }
+    }
+
+    /** Swed and Eisenhart, Annals of Mathematical Statistics 14 (1943) 66: the largest number of runs with a chance of at most 2.5 % (from memory). */
+    @ParameterizedTest
+    @CsvSource({"5, 5, 2", "8, 8, 4", "10, 10, 6", "12, 12, 7", "15, 15, 10", "20, 20, 14", "10, 15, 7", "10, 20, 9"})
+    void fewRunsMeetThePublishedTable(int positive, int negative, int critical) {
+        assertThat(ResidualChecks.fewRuns(critical, positive, negative)).isLessThanOrEqualTo(0.025);
+        assertThat(ResidualChecks.fewRuns(critical + 1, positive, negative)).isGreaterThan(0.025);
     }
 
     /** Beyond 200 residuals the normal approximation, against the sum of binomials in logarithms. */
@@ -145,6 +159,14 @@ class ResidualChecksTest {
         }
     }
 
+    /** SciPy 1.10.1, scipy.stats.anderson(x).statistic = 0.34544393245526805, before the factor for the number of values. */
+    @Test
+    void andersonDarlingAgainstSciPy() {
+        double[] x = {0.31, -0.52, 1.73, 0.08, -1.41, 0.66, -0.23, 2.94, -0.77, 0.12, -0.35, 0.91};
+        double factor = 1 + 0.75 / 12 + 2.25 / 144;
+        assertThat(ResidualChecks.andersonDarling(x)).isCloseTo(0.34544393245526805 * factor, within(1e-12));
+    }
+
     /** D'Agostino and Stephens (1986), table 4.7, upper 5 % and 1 % points of the modified statistic (from memory). */
     @ParameterizedTest
     @CsvSource({"0.752, 0.05", "1.035, 0.01"})
@@ -192,18 +214,78 @@ class ResidualChecksTest {
     }
 
     private static double[] chances(CheckName name) {
-        Random random = new Random(1234);
-        List<Double> chances = new ArrayList<>();
-        for (int k = 0; k < 1000; k++) {
-            Assessment a = Assessor.assess(Simulated.run(24, 1.5, 0, random), AssessmentOptions.usual());
-            a.checks().stream()
-                    .filter(c -> c.name() == name)
-                    .findFirst()
-                    .orElseThrow()
-                    .pValue()
-                    .ifPresent(chances::add);
+        return Simulated.assessments().stream()
+                .flatMap(a -> a.checks().stream())
+                .filter(c -> c.name() == name && c.pValue().isPresent())
+                .mapToDouble(c -> c.pValue().getAsDouble())
+                .toArray();
+    }
+
+    /**
+     * Where the model is a mean, the largest residual is Grubbs' test, whose two-sided critical values are published (ISO 5725-2:1994,
+     * table 5, "one largest or one smallest"; from memory).
+     */
+    @ParameterizedTest
+    @CsvSource({
+        "5, 0.05, 1.715",
+        "10, 0.05, 2.290",
+        "20, 0.05, 2.709",
+        "30, 0.05, 2.908",
+        "10, 0.01, 2.482",
+        "20, 0.01, 3.001"
+    })
+    void theLargestResidualOfAMeanIsGrubbsTest(int n, double level, double critical) {
+        // before exposure content is the start content, so it is a mean
+        double[] times = new double[n];
+        double[] contents = new double[n];
+        for (int i = 0; i < n; i++) {
+            times[i] = i - n;
+            contents[i] = i % 3;
         }
-        return chances.stream().mapToDouble(Double::doubleValue).toArray();
+        EstimationTask task = EstimationTask.of(FickianModel.through(1e-3), ContentSeries.of(times, contents));
+        task = task.withFixed(0, Math.log(1e-12)).withFixed(task.levelIndex(), 1);
+        ResidualSpace space = new ResidualSpace(Estimator.refit(task, new double[] {0, 0, 0}));
+        assertThat(space.residualVariance(1)).isCloseTo(1 - 1.0 / n, within(1e-12));
+        double unit = Math.sqrt(1 - 1.0 / n);
+        assertThat(n * space.tailOfStudentised((critical - 0.001) / unit)).isGreaterThan(level);
+        assertThat(n * space.tailOfStudentised((critical + 0.001) / unit)).isLessThan(level);
+    }
+
+    /** The same weighing left out, and the rest fitted anew: the deviation over its error is a t variate (linear in the contents here). */
+    @Test
+    void theChanceOfTheLargestResidualByLeavingItOut() {
+        double[] times = Simulated.times(16, 1.2);
+        double[] contents = Simulated.contents(times, 0, new Random(16));
+        contents[9] += 4 * Simulated.SIGMA * Simulated.RISE;
+        EstimationTask task =
+                EstimationTask.of(FickianModel.through(Simulated.PATH), ContentSeries.of(times, contents));
+        Estimate all = Estimator.estimate(task.withFixed(0, Math.log(Simulated.D)));
+        double[] g = all.fractions(times);
+        double[][] x = new double[15][1];
+        double[] y = new double[15];
+        for (int i = 0; i < 16; i++) {
+            if (i != 9) {
+                x[i < 9 ? i : i - 1][0] = g[i];
+                y[i < 9 ? i : i - 1] = contents[i];
+            }
+        }
+        OLSMultipleLinearRegression rest = new OLSMultipleLinearRegression();
+        rest.newSampleData(y, x);
+        double[] b = rest.estimateRegressionParameters();
+        double[][] v = rest.estimateRegressionParametersVariance();
+        double error =
+                Math.sqrt(rest.estimateErrorVariance() * (1 + v[0][0] + 2 * g[9] * v[0][1] + g[9] * g[9] * v[1][1]));
+        double t = (contents[9] - b[0] - b[1] * g[9]) / error;
+        double expected = 16 * 2 * new TDistribution(13).cumulativeProbability(-Math.abs(t));
+
+        Evidence largest = new ResidualChecks(new ResidualSpace(all))
+                .all().stream()
+                        .filter(e -> e.name() == CheckName.LARGEST_RESIDUAL)
+                        .findFirst()
+                        .orElseThrow();
+
+        assertThat(largest.figures()).contains(new Check.Figure("weighing", 10));
+        assertThat(largest.probability().getAsDouble()).isCloseTo(expected, within(1e-9 * expected));
     }
 
     @Test

@@ -2,6 +2,7 @@ package soakline.inference;
 
 import java.util.List;
 import java.util.Random;
+import java.util.stream.Stream;
 import soakline.estimate.Estimate;
 import soakline.estimate.EstimationTask;
 import soakline.estimate.Estimator;
@@ -37,9 +38,15 @@ final class Simulated {
         return times;
     }
 
+    /** Fractional uptake of the true curve, without noise. */
+    static double[] fractions(double[] times) {
+        double[] fractions = new double[times.length];
+        FickianModel.through(PATH).evaluate(times, times.length, new double[] {Math.log(D)}, fractions, null);
+        return fractions;
+    }
+
     static double[] contents(double[] times, double correlation, Random random) {
-        double[] contents = new double[times.length];
-        FickianModel.through(PATH).evaluate(times, times.length, new double[] {Math.log(D)}, contents, null);
+        double[] contents = fractions(times);
         double noise = random.nextGaussian();
         for (int i = 0; i < contents.length; i++) {
             if (i > 0) {
@@ -60,6 +67,19 @@ final class Simulated {
     static Run run(int n, double tau, double correlation, Random random) {
         double[] times = times(n, tau);
         return run(times, contents(times, correlation, random));
+    }
+
+    /** Assessments of 1,000 tests with white noise, n = 24, run to τ = 1.5, all as usual. Made once. */
+    static List<Assessment> assessments() {
+        return Assessments.ALL;
+    }
+
+    private static final class Assessments {
+        private static final Random RANDOM = new Random(1234);
+        static final List<Assessment> ALL = Stream.generate(
+                        () -> Assessor.assess(run(24, 1.5, 0, RANDOM), AssessmentOptions.usual()))
+                .limit(1000)
+                .toList();
     }
 
     static Run run(double[] times, double[] contents) {
