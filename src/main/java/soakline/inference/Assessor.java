@@ -77,7 +77,9 @@ public final class Assessor {
                 run,
                 estimate,
                 direction,
-                determined ? parameters(estimate, options) : parametersOfShortTest(estimate, options),
+                determined
+                        ? parameters(estimate, options, identifiability.interval())
+                        : parametersOfShortTest(estimate, options),
                 determined && !task.isFixed(0)
                         ? Optional.of(UncertaintyBudget.of(estimate, run.sheet(), options.level()))
                         : Optional.empty(),
@@ -125,28 +127,45 @@ public final class Assessor {
         return checks;
     }
 
-    private static List<ParameterResult> parameters(Estimate estimate, AssessmentOptions options) {
+    /**
+     * @param ofDiffusivity its profile interval at the usual level, which was needed before
+     */
+    private static List<ParameterResult> parameters(
+            Estimate estimate, AssessmentOptions options, Optional<Interval> ofDiffusivity) {
         EstimationTask task = estimate.task();
         List<Supplier<ParameterResult>> results = new ArrayList<>();
         for (int i = 0; i < task.shapeCount(); i++) {
             int shape = i;
-            results.add(() -> result(estimate, shape, options));
+            results.add(() -> shape == 0 && ofDiffusivity.isPresent() && isSame(ofDiffusivity.get(), options)
+                    ? result(estimate, shape, ofDiffusivity)
+                    : result(estimate, shape, options));
         }
         results.add(() -> result(estimate, task.levelIndex(), options));
         results.add(() -> result(estimate, task.startIndex(), options));
         return Side.bySide(task.data().size(), results);
     }
 
+    private static boolean isSame(Interval interval, AssessmentOptions options) {
+        return interval.level() == options.level() && interval.method() == options.method();
+    }
+
     private static ParameterResult result(Estimate estimate, int parameter, AssessmentOptions options) {
+        return result(
+                estimate,
+                parameter,
+                estimate.task().isFixed(parameter)
+                        ? Optional.empty()
+                        : Optional.of(Intervals.of(estimate, parameter, options.level(), options.method())));
+    }
+
+    private static ParameterResult result(Estimate estimate, int parameter, Optional<Interval> interval) {
         boolean fixed = estimate.task().isFixed(parameter);
         return new ParameterResult(
                 estimate.parameters().get(parameter),
                 OptionalDouble.of(estimate.value(parameter)),
                 fixed ? OptionalDouble.empty() : OptionalDouble.of(estimate.standardError(parameter)),
                 fixed,
-                fixed
-                        ? Optional.empty()
-                        : Optional.of(Intervals.of(estimate, parameter, options.level(), options.method())));
+                interval);
     }
 
     /** D and M∞ without values; the start content and the initial slope with theirs. */
