@@ -3,7 +3,6 @@ package soakline.intake;
 import java.io.BufferedInputStream;
 import java.io.IOException;
 import java.io.InputStream;
-import java.io.OutputStream;
 import java.io.Reader;
 import java.io.StringReader;
 import java.nio.file.Files;
@@ -65,7 +64,7 @@ public final class RunFileReader {
     }
 
     /**
-     * Reads all there is in a stream, which stays open.
+     * Reads all there is in a stream, to its end.
      *
      * @param size of the stream in bytes, for the progress
      * @param name that stands for the file's in the runs and notes
@@ -77,8 +76,6 @@ public final class RunFileReader {
         try {
             InputStream in = new BufferedInputStream(new DigestInputStream(raw, sha256), 1 << 16);
             RunFile read = tables(in, size, place, options, progress);
-            // whatever the parser left
-            in.transferTo(OutputStream.nullOutputStream());
             return new RunFile(read.coupons(), read.ownForm(), HexFormat.of().formatHex(sha256.digest()));
         } catch (IOException e) {
             throw failed(e, place);
@@ -131,9 +128,9 @@ public final class RunFileReader {
     }
 
     private static RunFile read(Reader text, Place place, ReadOptions options) throws IOException {
-        // the table is not closed: the stream is its owner's, who takes the digest of the rest
-        Table table = new CsvTable(text, place);
-        return new RunTable(table, place, options).read();
+        try (Table table = new CsvTable(text, place)) {
+            return new RunTable(table, place, options).read();
+        }
     }
 
     private static void requireFile(Path file, Place place) {

@@ -48,6 +48,16 @@ public enum Code {
     VALUES_ALL_EQUAL(Kind.INPUT),
     SAMPLE_MISSING(Kind.INPUT),
 
+    // ---- saving and recovery ----
+    SAVE_FOREIGN(Kind.USE),
+    SAVE_EXISTS(Kind.USE),
+    SAVE_GONE(Kind.USE),
+    SAVE_CHANGED(Kind.USE),
+    SAVE_UNKNOWN(Kind.USE),
+    RECOVERY_NOT_KEPT(Kind.WARNING),
+    RECOVERY_DAMAGED(Kind.INPUT),
+    RECOVERY_TAKEN(Kind.USE),
+
     // ---- notes on what was read ----
     CELL_NOT_A_NUMBER(Kind.NOTE),
     CELL_NOT_FINITE(Kind.NOTE),

@@ -20,9 +20,6 @@ public final class ExactText {
     private static final double LARGEST_PLAIN = 1e15;
     private static final double SMALLEST_PLAIN = 1e-7;
 
-    /** Division and multiplication each round once, so that what is looked for is at most two doubles away. */
-    private static final int NEIGHBOURS = 5;
-
     private static final double[] POWERS = new double[MOST_DECIMALS + 1];
 
     static {
@@ -52,13 +49,7 @@ public final class ExactText {
 
     /** Whether a decimal in that unit reads back to this value; much faster than to write it. */
     public static boolean exists(double si, Unit unit) {
-        double near = unit.fromSi(si);
-        for (int k = 0; k < NEIGHBOURS; k++) {
-            if (unit.toSi(neighbour(near, k)) == si) {
-                return true;
-            }
-        }
-        return false;
+        return unit.toSi(unit.fromSi(si)) == si;
     }
 
     private static Optional<String> of(double si, DoubleUnaryOperator fromSi, DoubleUnaryOperator toSi) {
@@ -97,31 +88,25 @@ public final class ExactText {
         return text.append("0.").append("0".repeat(-whole)).append(digits).toString();
     }
 
+    /**
+     * Of the doubles whose product is the value, if there are any, the quotient is one: where products lie further apart than
+     * doubles, half a step of the value is less than half a step of the quotient; where they lie closer, the quotient's product is
+     * off by less than half a step of the value.
+     */
     private static Optional<String> general(double si, DoubleUnaryOperator fromSi, DoubleUnaryOperator toSi) {
-        double near = fromSi.applyAsDouble(si);
+        double value = fromSi.applyAsDouble(si);
+        if (!Double.isFinite(value)) {
+            return Optional.empty();
+        }
+        BigDecimal exact = new BigDecimal(value);
         for (int digits : DIGITS) {
-            for (int k = 0; k < NEIGHBOURS; k++) {
-                double value = neighbour(near, k);
-                if (!Double.isFinite(value) || toSi.applyAsDouble(value) != si) {
-                    continue;
-                }
-                String text = text(new BigDecimal(value).round(new MathContext(digits)));
-                OptionalDouble read = Numbers.parse(text, '.');
-                if (read.isPresent() && toSi.applyAsDouble(read.getAsDouble()) == si) {
-                    return Optional.of(text);
-                }
+            String text = text(exact.round(new MathContext(digits)));
+            OptionalDouble read = Numbers.parse(text, '.');
+            if (read.isPresent() && toSi.applyAsDouble(read.getAsDouble()) == si) {
+                return Optional.of(text);
             }
         }
         return Optional.empty();
-    }
-
-    /** The double itself, the next one up, the next one down, and so on outwards. */
-    private static double neighbour(double near, int number) {
-        double value = near;
-        for (int step = 0; step < (number + 1) / 2; step++) {
-            value = number % 2 == 1 ? Math.nextUp(value) : Math.nextDown(value);
-        }
-        return value;
     }
 
     private static String text(BigDecimal value) {

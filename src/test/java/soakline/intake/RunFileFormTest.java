@@ -7,6 +7,8 @@ import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.security.MessageDigest;
+import java.util.HexFormat;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -253,6 +255,14 @@ class RunFileFormTest {
                 .row(0, 31.5)
                 .bytes();
         assertThat(open(workbook).ownForm()).isFalse();
+    }
+
+    @Test
+    void theDigestOfAWorkbookIsThatOfAllItsBytes() throws Exception {
+        byte[] workbook =
+                new Workbooks().row("time [h]", "mass [g]").row(0, 31.5).bytes();
+        byte[] digest = MessageDigest.getInstance("SHA-256").digest(workbook);
+        assertThat(open(workbook).digest()).isEqualTo(HexFormat.of().formatHex(digest));
     }
 
     /** The digests are those of the command sha256sum of GNU coreutils. */
