@@ -7,6 +7,7 @@ import java.util.Set;
 import java.util.regex.Pattern;
 import soakline.quantity.Dimension;
 import soakline.quantity.Unit;
+import soakline.specimen.RunFileWords;
 
 /**
  * What the title of a column says.
@@ -29,14 +30,8 @@ record Column(int index, Role role, String title, String coupon, String unitText
         OTHER
     }
 
-    private static final Set<String> TIME_WORDS =
-            Set.of("time", "elapsed", "date", "datetime", "timestamp", "clock", "duration");
-    private static final Set<String> CONTENT_WORDS =
-            Set.of("content", "moisture", "uptake", "gain", "change", "absorption", "concentration");
-    private static final Set<String> MASS_WORDS = Set.of("mass", "weight", "wt");
     private static final Pattern NOT_A_NAME = Pattern.compile(
-            "(?i)(?<![\\p{L}\\p{N}])(mass|weight|wt|content|moisture|uptake|gain|change|absorption|concentration|water|of|"
-                    + "set|aside)(?![\\p{L}\\p{N}])");
+            "(?i)(?<![\\p{L}\\p{N}])(" + String.join("|", RunFileWords.wordsOfNoCoupon()) + ")(?![\\p{L}\\p{N}])");
     private static final Pattern LOOSE_ENDS = Pattern.compile("^[\\s_:,.;-]+|[\\s_:,.;-]+$");
 
     /** Reads a title such as {@code A1 mass [g]}, {@code Time (h)} or {@code m/g}. */
@@ -73,11 +68,11 @@ record Column(int index, Role role, String title, String coupon, String unitText
     private static Column named(int index, String title, String name, String unit) {
         String lower = name.toLowerCase(Locale.ROOT);
         Set<String> words = Set.copyOf(Arrays.asList(lower.split("[^\\p{L}\\p{N}]+")));
-        boolean isContent = words.stream().anyMatch(CONTENT_WORDS::contains);
-        if (words.contains("set") && words.contains("aside")) {
+        boolean isContent = words.stream().anyMatch(RunFileWords.CONTENT_TITLES::contains);
+        if (words.containsAll(RunFileWords.SET_ASIDE_TITLE)) {
             return new Column(index, Role.SET_ASIDE, title, coupon(name), unit, Dimension.CONTENT);
         }
-        if (words.stream().anyMatch(TIME_WORDS::contains) || lower.equals("t")) {
+        if (words.stream().anyMatch(RunFileWords.TIME_TITLES::contains) || lower.equals("t")) {
             Role role = words.contains("date") && !words.contains("time") ? Role.DATE : Role.TIME;
             return new Column(index, role, title, "", unit, Dimension.TIME);
         }
@@ -88,7 +83,7 @@ record Column(int index, Role role, String title, String coupon, String unitText
             return new Column(index, Role.VALUE, title, coupon(name), unit, Dimension.CONTENT);
         }
         // a mass is known by its unit, even when the title is only the coupon's name
-        boolean isMass = words.stream().anyMatch(MASS_WORDS::contains) || lower.equals("m");
+        boolean isMass = words.stream().anyMatch(RunFileWords.MASS_TITLES::contains) || lower.equals("m");
         if (isMass || Unit.find(unit, Dimension.MASS).isPresent()) {
             return new Column(index, Role.VALUE, title, lower.equals("m") ? "" : coupon(name), unit, Dimension.MASS);
         }

@@ -29,6 +29,7 @@ final class CsvTable implements Table {
     private final Iterator<CSVRecord> records;
     private int linesAbove;
     private CSVRecord record;
+    private boolean remarks;
     private long end;
     private long line;
 
@@ -117,9 +118,11 @@ final class CsvTable implements Table {
     public boolean next() throws IOException {
         try {
             if (!records.hasNext()) {
+                remarks |= parser.hasTrailerComment();
                 return false;
             }
             record = records.next();
+            remarks |= record.hasComment();
         } catch (UncheckedIOException e) {
             if (e.getCause() instanceof CSVException) {
                 throw quotesNotClosed();
@@ -162,6 +165,11 @@ final class CsvTable implements Table {
     @Override
     public String cell(int index) {
         return index < record.size() ? record.get(index) : "";
+    }
+
+    @Override
+    public boolean isOwnForm() {
+        return dialect.delimiter() == ',' && dialect.decimalSign() != ',' && !remarks;
     }
 
     @Override

@@ -74,7 +74,10 @@ record Dialect(char delimiter, char decimalSign) {
         boolean quoted = false;
         for (int i = 0; i < line.length(); i++) {
             char c = line.charAt(i);
-            if (c == '"') {
+            if (c == '"' && quoted && i + 1 < line.length() && line.charAt(i + 1) == '"') {
+                // a mark of the text itself, which is then no number
+                cell.append(c);
+            } else if (c == '"') {
                 quoted = !quoted;
             } else if (c == delimiter && !quoted) {
                 cells.add(cell.toString());

@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Place;
@@ -19,25 +18,11 @@ import soakline.specimen.Edges;
 import soakline.specimen.Faces;
 import soakline.specimen.Facts;
 import soakline.specimen.Facts.Other;
+import soakline.specimen.QuotedText;
+import soakline.specimen.RunFileWords;
 
 /** Fact lines to the facts of one coupon. A fact that names the coupon goes before one that is for all. */
 final class FactReader {
-
-    static final String EXPOSED_FROM = "exposed from";
-
-    private static final Set<String> KNOWN = Set.of(
-            "specimen",
-            "thickness",
-            "width",
-            "length",
-            "faces",
-            "edges",
-            "temperature",
-            "medium",
-            "dry mass",
-            "balance",
-            "note",
-            EXPOSED_FROM);
 
     private final List<FactLine> lines;
     private final List<String> coupons;
@@ -61,23 +46,68 @@ final class FactReader {
         Map<String, FactLine> known = known(coupon, notes);
         Facts facts = new Facts(
                 specimen(coupon, known),
-                quantity(known, "thickness", "2.03 mm ± 0.01 mm", Dimension.LENGTH),
-                quantity(known, "width", "100 mm", Dimension.LENGTH),
-                quantity(known, "length", "100 mm", Dimension.LENGTH),
-                Optional.ofNullable(known.get("faces")).map(this::faces),
-                Optional.ofNullable(known.get("edges")).map(this::edges),
-                quantity(known, "temperature", "60 °C", Dimension.TEMPERATURE),
-                Optional.ofNullable(known.get("medium")).map(FactLine::value),
-                quantity(known, "dry mass", "31.2041 g", Dimension.MASS),
-                quantity(known, "balance", "0.1 mg", Dimension.MASS, Dimension.CONTENT),
-                Optional.ofNullable(known.get("note")).map(FactLine::value),
-                unknown(coupon, notes));
+                quantity(known, RunFileWords.THICKNESS, "2.03 mm ± 0.01 mm", Dimension.LENGTH),
+                quantity(known, RunFileWords.WIDTH, "100 mm", Dimension.LENGTH),
+                quantity(known, RunFileWords.LENGTH, "100 mm", Dimension.LENGTH),
+                Optional.ofNullable(known.get(RunFileWords.FACES)).map(this::faces),
+                Optional.ofNullable(known.get(RunFileWords.EDGES)).map(this::edges),
+                quantity(known, RunFileWords.TEMPERATURE, "60 °C", Dimension.TEMPERATURE),
+                Optional.ofNullable(known.get(RunFileWords.MEDIUM)).map(FactLine::text),
+                quantity(known, RunFileWords.DRY_MASS, "31.2041 g", Dimension.MASS),
+                quantity(known, RunFileWords.BALANCE, "0.1 mg", Dimension.MASS, Dimension.CONTENT),
+                Optional.ofNullable(known.get(RunFileWords.NOTE)).map(FactLine::text),
+                unknown(coupon, known, notes));
         return facts;
     }
 
     /** What the file says about the time of exposure of a coupon. */
     Optional<FactLine> exposedFrom(String coupon) {
-        return Optional.ofNullable(known(coupon, new NoteBook(place)).get(EXPOSED_FROM));
+        return one(coupon, RunFileWords.EXPOSED_FROM);
+    }
+
+    /** What the file says about the calendar time of time zero of a coupon. */
+    Optional<FactLine> timeZero(String coupon) {
+        return one(coupon, RunFileWords.TIME_ZERO);
+    }
+
+    private Optional<FactLine> one(String coupon, String key) {
+        return Optional.ofNullable(known(coupon, new NoteBook(place)).get(key));
+    }
+
+    /** What the file says about the estimate of a coupon. */
+    List<Choice> choices(String coupon) {
+        List<Choice> choices = new ArrayList<>();
+        known(coupon, new NoteBook(place)).forEach((key, fact) -> {
+            if (RunFileWords.isChoice(key)) {
+                String name = owner(fact).isEmpty()
+                        ? fact.name()
+                        : fact.without(coupon).name();
+                choices.add(new Choice(name, fact.text(), place.line(fact.line())));
+            }
+        });
+        return choices;
+    }
+
+    /** Whether any fact is one of a run file's own, so that this is no table that only begins with some remarks. */
+    boolean holdsOwnFacts() {
+        for (FactLine fact : lines) {
+            String key = key(fact, owner(fact));
+            if (isKnown(key) || (key.equals(RunFileWords.RUN_FILE) && version(fact) > 0)) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private static boolean isKnown(String key) {
+        return RunFileWords.FACTS.contains(key) || key.equals(RunFileWords.TIME_ZERO) || RunFileWords.isChoice(key);
+    }
+
+    /** The version of the run file's form; 0 when the value is none. */
+    private static int version(FactLine fact) {
+        String value = fact.value();
+        boolean number = value.length() < 6 && !value.isEmpty() && value.chars().allMatch(c -> c >= '0' && c <= '9');
+        return number ? Integer.parseInt(value) : 0;
     }
 
     /** Known facts by name; a blank in a form that nobody filled in is no fact. */
@@ -87,7 +117,7 @@ final class FactReader {
         for (FactLine fact : lines) {
             String owner = owner(fact);
             String key = key(fact, owner);
-            if (!KNOWN.contains(key) || fact.value().isEmpty()) {
+            if (!isKnown(key) || fact.value().isEmpty()) {
                 continue;
             }
             if (owner.isEmpty()) {
@@ -104,27 +134,42 @@ final class FactReader {
         FactLine before = facts.get(key);
         if (before == null) {
             facts.put(key, fact);
-        } else if (key.equals("note")) {
-            facts.put(key, new FactLine(fact.name(), before.value() + "; " + fact.value(), before.line()));
+        } else if (key.equals(RunFileWords.NOTE)) {
+            String both = QuotedText.fact(before.text() + "; " + fact.text());
+            facts.put(key, new FactLine(fact.name(), both, before.line()));
         } else {
             notes.add(Code.FACT_REPEATED, fact.line(), 0, Excerpt.of(fact.name()), Excerpt.of(fact.value()));
             facts.put(key, fact);
         }
     }
 
-    private List<Other> unknown(String coupon, NoteBook notes) {
+    private List<Other> unknown(String coupon, Map<String, FactLine> known, NoteBook notes) {
         List<Other> others = new ArrayList<>();
         for (FactLine fact : lines) {
             String owner = owner(fact);
-            if (KNOWN.contains(key(fact, owner)) || !(owner.isEmpty() || owner.equals(coupon))) {
+            String key = key(fact, owner);
+            if (!(owner.isEmpty() || owner.equals(coupon)) || isVersion(fact, key, notes)) {
                 continue;
             }
-            others.add(new Other(fact.name(), fact.value()));
-            if (!fact.name().equals(FactLine.REMARK)) {
-                notes.add(Code.FACT_UNKNOWN_KEPT, fact.line(), 0, Excerpt.of(fact.name()));
+            FactLine own = owner.isEmpty() ? fact : fact.without(owner);
+            if (key.equals(RunFileWords.TIME_ZERO) && fact.equals(known.get(key))) {
+                others.add(new Other(RunFileWords.TIME_ZERO, own.text()));
+            } else if (!isKnown(key)) {
+                others.add(new Other(QuotedText.read(own.name()), own.text()));
+                if (!own.name().equals(RunFileWords.REMARK)) {
+                    notes.add(Code.FACT_UNKNOWN_KEPT, fact.line(), 0, Excerpt.of(fact.name()));
+                }
             }
         }
         return others;
+    }
+
+    private boolean isVersion(FactLine fact, String key, NoteBook notes) {
+        int version = key.equals(RunFileWords.RUN_FILE) ? version(fact) : 0;
+        if (version > RunFileWords.VERSION) {
+            notes.add(Code.RUN_FILE_NEWER, fact.line(), 0, version, RunFileWords.VERSION);
+        }
+        return version > 0;
     }
 
     /** The coupon whose name a fact begins with, the longest of them; empty when it is for all. */
@@ -132,7 +177,7 @@ final class FactReader {
         String name = fact.key();
         String best = "";
         for (String coupon : coupons) {
-            String key = new FactLine(coupon, "", 0).key();
+            String key = RunFileWords.key(coupon);
             if (coupon.length() > best.length() && name.startsWith(key + " ")) {
                 best = coupon;
             }
@@ -141,23 +186,21 @@ final class FactReader {
     }
 
     private static String key(FactLine fact, String owner) {
-        return owner.isEmpty()
-                ? fact.key()
-                : fact.named(fact.key().substring(owner.length())).key();
+        return owner.isEmpty() ? fact.key() : fact.without(owner).key();
     }
 
     /** Several coupons need several names, even when the file names the panel they were cut from. */
     private String specimen(String coupon, Map<String, FactLine> known) {
-        FactLine fact = known.get("specimen");
+        FactLine fact = known.get(RunFileWords.SPECIMEN);
         if (fact == null) {
             return coupon;
         }
         boolean shared = coupons.size() > 1 && owner(fact).isEmpty();
-        return shared ? (fact.value() + " " + coupon).strip() : fact.value();
+        return shared ? (fact.text() + " " + coupon).strip() : fact.text();
     }
 
     private Faces faces(FactLine fact) {
-        return switch (fact.value().toLowerCase(Locale.ROOT)) {
+        return switch (fact.text().toLowerCase(Locale.ROOT)) {
             case "both", "two", "2" -> Faces.BOTH;
             case "one", "single", "1" -> Faces.ONE;
             default -> throw notOneOf(fact, "both, one");
@@ -165,7 +208,7 @@ final class FactReader {
     }
 
     private Edges edges(FactLine fact) {
-        return switch (fact.value().toLowerCase(Locale.ROOT)) {
+        return switch (fact.text().toLowerCase(Locale.ROOT)) {
             case "bare" -> Edges.BARE;
             case "sealed" -> Edges.SEALED;
             default -> throw notOneOf(fact, "bare, sealed");
@@ -196,7 +239,7 @@ final class FactReader {
         QuantityFormatException first = null;
         for (Dimension dimension : dimensions) {
             try {
-                return QuantityText.parse(fact.value(), dimension);
+                return QuantityText.parse(fact.text(), dimension);
             } catch (QuantityFormatException e) {
                 first = first == null ? e : first;
             }

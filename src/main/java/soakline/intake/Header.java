@@ -77,6 +77,14 @@ record Header(Column time, Optional<Column> clock, List<Column> values, List<Col
                 && times.stream().allMatch(c -> c.unit().isEmpty());
     }
 
+    /** Whether every column is one that a run file has. */
+    boolean isOwnForm() {
+        boolean owned = setAside.stream()
+                .allMatch(a -> a.coupon().isEmpty()
+                        || values.stream().anyMatch(v -> v.coupon().equalsIgnoreCase(a.coupon())));
+        return owned && clock.isEmpty() && 1 + values.size() + setAside.size() == size;
+    }
+
     /** Two coupons of one name would be mixed up, so those are told apart by their column. */
     private static List<Column> distinct(List<Column> values) {
         List<Column> result = new ArrayList<>();

@@ -6,6 +6,7 @@ import java.time.LocalDateTime;
 import java.time.LocalTime;
 import java.time.ZoneId;
 import java.time.ZoneOffset;
+import java.time.ZonedDateTime;
 import java.time.temporal.ChronoField;
 import java.util.Optional;
 
@@ -61,7 +62,7 @@ final class IsoMoments implements MomentFormat {
                 }
             }
             long local = day * 86_400 + hour * 3600L + minute * 60L + second;
-            return at == text.length() ? new Moment(local, nano, false) : zoned(local, nano);
+            return at == text.length() ? Moment.plain(local, nano) : zoned(local, nano);
         }
 
         private Moment zoned(long local, int nano) {
@@ -72,14 +73,16 @@ final class IsoMoments implements MomentFormat {
                 throw new DateTimeException("no closing bracket");
             }
             if (!offset.isEmpty()) {
-                return new Moment(
-                        local - ZoneOffset.of(offset.equals("z") ? "Z" : offset).getTotalSeconds(), nano, true);
+                int seconds = ZoneOffset.of(offset.equals("z") ? "Z" : offset).getTotalSeconds();
+                return new Moment(local - seconds, nano, true, seconds);
             }
             ZoneId zone = ZoneId.of(text.substring(bracket + 1, text.length() - 1));
             LocalDateTime clock = LocalDateTime.of(
                     LocalDate.ofEpochDay(Math.floorDiv(local, 86_400)),
                     LocalTime.ofSecondOfDay(Math.floorMod(local, 86_400)));
-            return new Moment(clock.atZone(zone).toEpochSecond(), nano, true);
+            ZonedDateTime there = clock.atZone(zone);
+            return new Moment(
+                    there.toEpochSecond(), nano, true, there.getOffset().getTotalSeconds());
         }
 
         private int number(int digits) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import soakline.problem.Code;
 import soakline.problem.Finding;
 import soakline.problem.Place;
@@ -35,6 +36,10 @@ final class NoteBook {
         other.kept.forEach((code, findings) ->
                 kept.computeIfAbsent(code, c -> new ArrayList<>()).addAll(findings));
         other.left.forEach((code, count) -> left.merge(code, count, Integer::sum));
+    }
+
+    boolean holdsAnyOf(Set<Code> codes) {
+        return kept.keySet().stream().anyMatch(codes::contains);
     }
 
     /** All notes, those of a kind together. */

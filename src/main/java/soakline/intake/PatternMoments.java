@@ -1,7 +1,6 @@
 package soakline.intake;
 
 import java.time.DateTimeException;
-import java.time.Instant;
 import java.time.LocalDate;
 import java.time.LocalDateTime;
 import java.time.LocalTime;
@@ -56,8 +55,9 @@ final class PatternMoments implements MomentFormat {
             LocalTime time = parsed.query(TemporalQueries.localTime());
             ZoneId zone = parsed.query(TemporalQueries.zone());
             LocalDateTime clock = LocalDateTime.of(date, time == null ? LocalTime.MIDNIGHT : time);
-            Instant instant = clock.atZone(zone == null ? ZoneOffset.UTC : zone).toInstant();
-            return Optional.of(new Moment(instant.getEpochSecond(), instant.getNano(), zone != null));
+            ZonedDateTime there = clock.atZone(zone == null ? ZoneOffset.UTC : zone);
+            int offset = there.getOffset().getTotalSeconds();
+            return Optional.of(new Moment(there.toEpochSecond(), there.getNano(), zone != null, offset));
         } catch (DateTimeException e) {
             return Optional.empty();
         }

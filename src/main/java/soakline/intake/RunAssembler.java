@@ -7,7 +7,9 @@ import soakline.problem.Code;
 import soakline.problem.Place;
 import soakline.quantity.Dimension;
 import soakline.specimen.Facts;
+import soakline.specimen.Facts.Other;
 import soakline.specimen.Run;
+import soakline.specimen.RunFileWords;
 import soakline.specimen.ValueKind;
 import soakline.specimen.Weighings;
 
@@ -38,22 +40,22 @@ final class RunAssembler {
      * @param fileNotes what concerns every coupon
      * @param couponNotes one for each value column
      */
-    List<Run> runs(List<FactLine> lines, NoteBook fileNotes, NoteBook[] couponNotes) {
+    List<FileCoupon> coupons(FactReader reader, NoteBook fileNotes, NoteBook[] couponNotes) {
         noteOrder(fileNotes);
         store.sort();
         List<String> coupons = header.values().stream().map(Column::coupon).toList();
-        FactReader reader = new FactReader(lines, coupons, place);
-        List<Run> runs = new ArrayList<>();
+        List<FileCoupon> read = new ArrayList<>();
         for (int c = 0; c < coupons.size(); c++) {
             NoteBook notes = couponNotes[c];
             notes.addAll(fileNotes);
             Facts facts = reader.facts(coupons.get(c), notes);
             ValueKind kind = header.values().get(c).dimension() == Dimension.MASS ? ValueKind.MASS : ValueKind.CONTENT;
-            double zero = zero(c, reader.exposedFrom(coupons.get(c)));
+            double zero = zero(c, exposedFrom(reader, coupons.get(c)));
             Weighings weighings = weighings(c, zero, kind, notes);
-            runs.add(new Run(place.source(), facts, kind, weighings, notes.notes()));
+            Run run = new Run(place.source(), withTimeZero(facts, zero), kind, weighings, notes.notes());
+            read.add(new FileCoupon(run, reader.choices(coupons.get(c))));
         }
-        return runs;
+        return read;
     }
 
     private void noteOrder(NoteBook notes) {
@@ -71,6 +73,33 @@ final class RunAssembler {
                 notes.add(Code.CLOCK_CHANGE, store.line(row), header.time().index() + 1, Math.round(back));
             }
         }
+    }
+
+    /** Among date-times, a stated time zero says the same as the time of exposure. */
+    private Optional<FactLine> exposedFrom(FactReader reader, String coupon) {
+        Optional<FactLine> stated = reader.exposedFrom(coupon);
+        return times.hasNoZero() ? stated.or(() -> reader.timeZero(coupon)) : stated;
+    }
+
+    /** With the calendar time of time zero, which elapsed times alone would lose. */
+    private Facts withTimeZero(Facts facts, double zero) {
+        List<Other> others = new ArrayList<>();
+        for (Other other : facts.other()) {
+            boolean isTimeZero = other.name().equals(RunFileWords.TIME_ZERO);
+            if (isTimeZero && zero != 0) {
+                // elapsed times that now count from a later zero; among date-times it is worked out below
+                Optional<Moment> moment = new IsoMoments().read(other.value());
+                others.add(new Other(
+                        other.name(), moment.map(m -> m.plus(zero).text()).orElse(other.value())));
+            } else {
+                others.add(other);
+            }
+        }
+        if (times.hasNoZero()) {
+            others.removeIf(o -> o.name().equals(RunFileWords.TIME_ZERO));
+            others.add(new Other(RunFileWords.TIME_ZERO, times.calendar(zero)));
+        }
+        return facts.withOther(others);
     }
 
     /** Stated, or the first weighing of the coupon among date-times, or the zero of the elapsed times. */

@@ -2,16 +2,27 @@ package soakline.intake;
 
 import java.io.IOException;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.Set;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Place;
 import soakline.quantity.Unit;
-import soakline.specimen.Run;
+import soakline.specimen.QuotedText;
 
 /** Reads the rows of a table into a {@link RowStore} and hands them to the {@link RunAssembler}. One use. */
 final class RunTable {
+
+    /** What a file said and the runs do not hold. */
+    private static final Set<Code> LOSSES = EnumSet.of(
+            Code.CELL_NOT_A_NUMBER,
+            Code.CELL_NOT_FINITE,
+            Code.TIME_CELL_BAD,
+            Code.ROW_TOO_LONG,
+            Code.ROWS_SORTED,
+            Code.FACT_REPEATED);
 
     private final Table table;
     private final Place place;
@@ -24,6 +35,7 @@ final class RunTable {
     private NoteBook[] notes;
     private int[] emptyCells;
     private RowStore store;
+    private boolean ownForm = true;
     private String firstBadTime = "";
     private Place firstBadPlace;
 
@@ -37,11 +49,11 @@ final class RunTable {
     }
 
     /**
-     * One run a value column.
+     * One coupon a value column.
      *
      * @throws Fault when the table holds none
      */
-    List<Run> runs() throws IOException {
+    RunFile read() throws IOException {
         boolean more = nextFilled();
         if (!more) {
             throw Fault.of(Code.FILE_EMPTY).at(place);
@@ -64,7 +76,14 @@ final class RunTable {
                 notes[c].add(Code.CELLS_EMPTY, 0, header.values().get(c).index() + 1, emptyCells[c]);
             }
         }
-        return new RunAssembler(header, store, times, place).runs(table.facts(), fileNotes, notes);
+        List<String> names = header.values().stream().map(Column::coupon).toList();
+        FactReader facts = new FactReader(table.facts(), names, place);
+        List<FileCoupon> coupons = new RunAssembler(header, store, times, place).coupons(facts, fileNotes, notes);
+        ownForm &= table.isOwnForm() && header.isOwnForm() && facts.holdsOwnFacts() && !times.hasNoZero();
+        for (NoteBook book : notes) {
+            ownForm &= !book.holdsAnyOf(LOSSES);
+        }
+        return new RunFile(coupons, ownForm, "");
     }
 
     /** The first row is the header; units may stand below it. Returns whether a row of data is next. */
@@ -74,6 +93,7 @@ final class RunTable {
         boolean more = nextFilled();
         if (more && Header.isUnitsRow(cells())) {
             titles = Header.withUnits(titles, cells());
+            ownForm = false;
             more = nextFilled();
         }
         header = Header.of(titles, headerPlace);
@@ -91,6 +111,7 @@ final class RunTable {
 
     /** The user names the columns; titles and units of the file's own, which hold no weighing, are passed over. */
     private boolean columnsFromOption(String columns) throws IOException {
+        ownForm = false;
         Place optionPlace = Place.of("--columns");
         char delimiter = columns.indexOf(';') >= 0 ? ';' : ',';
         List<String> titles = List.of(columns.split(String.valueOf(delimiter), -1));
@@ -167,6 +188,7 @@ final class RunTable {
             fileNotes.add(Code.ROW_TOO_LONG, table.line(), header.size() + 1, table.size(), header.size());
             return;
         }
+        ownForm &= isBlankBeyond(header.size());
         store.add(time, table.line());
         for (int c = 0; c < units.length; c++) {
             store.setValue(c, value(c));
@@ -199,6 +221,15 @@ final class RunTable {
         return false;
     }
 
+    private boolean isBlankBeyond(int from) {
+        for (int i = from; i < table.size(); i++) {
+            if (!table.cell(i).isBlank()) {
+                return false;
+            }
+        }
+        return true;
+    }
+
     /** The value of a coupon in SI; NaN, with a note, when there is none. */
     private double value(int coupon) {
         int index = header.values().get(coupon).index();
@@ -221,16 +252,20 @@ final class RunTable {
     }
 
     private void setAside(Column aside) {
-        String reason = table.cell(aside.index()).strip();
-        if (reason.isEmpty()) {
+        String cell = table.cell(aside.index()).strip();
+        if (cell.isEmpty()) {
             return;
         }
+        String reason = QuotedText.read(cell);
+        boolean kept = false;
         for (int c = 0; c < units.length; c++) {
             boolean meant = aside.coupon().isEmpty()
                     || aside.coupon().equalsIgnoreCase(header.values().get(c).coupon());
             if (meant) {
                 store.setAside(c, reason);
+                kept |= !Double.isNaN(store.value(c, store.size() - 1));
             }
         }
+        ownForm &= kept;
     }
 }

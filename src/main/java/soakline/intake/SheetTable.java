@@ -204,6 +204,11 @@ final class SheetTable implements Table {
     }
 
     @Override
+    public boolean isOwnForm() {
+        return false;
+    }
+
+    @Override
     public void close() throws IOException {
         stream.close();
         workbook.close();

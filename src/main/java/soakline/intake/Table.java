@@ -24,4 +24,7 @@ interface Table extends Closeable {
 
     /** Text of a cell, from 0; empty beyond the end of the row. */
     String cell(int index);
+
+    /** Whether a run file that the program writes would be a table like this one; asked behind the last row. */
+    boolean isOwnForm();
 }

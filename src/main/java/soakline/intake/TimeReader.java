@@ -32,7 +32,7 @@ final class TimeReader {
     private final boolean patternStated;
     private Kind kind = Kind.UNDECIDED;
     private double secondsPerUnit;
-    private Moment origin = new Moment(0, 0, false);
+    private Moment origin = Moment.plain(0, 0);
 
     /**
      * @param header where the titles stand, for a fault about the unit
@@ -109,6 +109,11 @@ final class TimeReader {
         return kind == Kind.MOMENT && !origin.zoned();
     }
 
+    /** A time on the scale of {@link #read} as a calendar time, where the times are date-times. */
+    String calendar(double seconds) {
+        return origin.plus(seconds).text();
+    }
+
     /**
      * The time of exposure on the scale of {@link #read}.
      *
@@ -117,14 +122,13 @@ final class TimeReader {
      * @throws Fault when it is neither
      */
     double exposure(FactLine fact, double first, Place place) {
-        Optional<Moment> moment = format.read(fact.value()).or(() -> new IsoMoments().read(fact.value()));
+        Optional<Moment> moment = format.read(fact.text()).or(() -> new IsoMoments().read(fact.text()));
         if (moment.isPresent() && kind == Kind.MOMENT && moment.get().zoned() == origin.zoned()) {
             return moment.get().since(origin);
         }
         if (moment.isEmpty()) {
             try {
-                double seconds =
-                        QuantityText.parse(fact.value(), Dimension.TIME).si();
+                double seconds = QuantityText.parse(fact.text(), Dimension.TIME).si();
                 return kind == Kind.MOMENT ? first + seconds : seconds;
             } catch (QuantityFormatException e) {
                 throw exposureFault(fact, place);
@@ -135,7 +139,7 @@ final class TimeReader {
 
     private Fault exposureFault(FactLine fact, Place place) {
         String example = kind == Kind.NUMBER ? "1.5 h" : origin.zoned() ? "2026-03-01T08:30Z" : "2026-03-01 08:30";
-        return Fault.of(Code.EXPOSED_FROM_BAD, Excerpt.of(fact.value()), example)
+        return Fault.of(Code.EXPOSED_FROM_BAD, Excerpt.of(fact.name()), Excerpt.of(fact.value()), example)
                 .at(place.line(fact.line()));
     }
 }

@@ -26,6 +26,7 @@ final class Utf8OrLatinReader extends Reader {
             .onUnmappableCharacter(CodingErrorAction.REPORT);
     private final ByteBuffer bytes = ByteBuffer.allocate(1 << 16).flip();
     private boolean ended;
+    private boolean utf8Only = true;
 
     Utf8OrLatinReader(InputStream in) {
         this.in = in;
@@ -44,6 +45,7 @@ final class Utf8OrLatinReader extends Reader {
             }
             CoderResult result = utf8.decode(bytes, chars, ended);
             if (result.isMalformed() && chars.hasRemaining()) {
+                utf8Only = false;
                 decodeLatin(result.length(), chars);
             } else if (result.isOverflow() && chars.position() == start) {
                 // room for one char only, and a pair is next
@@ -58,6 +60,11 @@ final class Utf8OrLatinReader extends Reader {
     private int readOneOfAPair(char[] target, int offset) {
         decodeLatin(1, CharBuffer.wrap(target, offset, 1));
         return 1;
+    }
+
+    /** Whether all that was read so far is UTF-8. */
+    boolean isUtf8() {
+        return utf8Only;
     }
 
     private void decodeLatin(int count, CharBuffer chars) {

@@ -38,6 +38,8 @@ public enum Code {
     FACT_UNIT_UNKNOWN(Kind.INPUT),
     FACT_NOT_POSITIVE(Kind.INPUT),
     FACT_NOT_ONE_OF(Kind.INPUT),
+    FACT_LEVEL_BAD(Kind.INPUT),
+    TEXT_TOO_LONG(Kind.INPUT),
     TIME_NOT_UNDERSTOOD(Kind.INPUT),
     EXPOSED_FROM_BAD(Kind.INPUT),
     DATE_PATTERN_BAD(Kind.INPUT),
@@ -45,6 +47,16 @@ public enum Code {
     TIMES_ALL_EQUAL(Kind.INPUT),
     VALUES_ALL_EQUAL(Kind.INPUT),
     SAMPLE_MISSING(Kind.INPUT),
+
+    // ---- saving and recovery ----
+    SAVE_FOREIGN(Kind.USE),
+    SAVE_EXISTS(Kind.USE),
+    SAVE_GONE(Kind.USE),
+    SAVE_CHANGED(Kind.USE),
+    SAVE_UNKNOWN(Kind.USE),
+    RECOVERY_NOT_KEPT(Kind.WARNING),
+    RECOVERY_DAMAGED(Kind.INPUT),
+    RECOVERY_TAKEN(Kind.USE),
 
     // ---- notes on what was read ----
     CELL_NOT_A_NUMBER(Kind.NOTE),
@@ -60,6 +72,7 @@ public enum Code {
     FACT_UNKNOWN_KEPT(Kind.NOTE),
     FACT_REPEATED(Kind.NOTE),
     CONTENT_FROM_FIRST_WEIGHING(Kind.NOTE),
+    RUN_FILE_NEWER(Kind.NOTE),
     BEFORE_EXPOSURE(Kind.NOTE),
     CLOCK_CHANGE(Kind.NOTE),
 

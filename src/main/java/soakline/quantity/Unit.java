@@ -81,6 +81,16 @@ public enum Unit {
         return si / factor;
     }
 
+    /** The unit of a dimension in which values stand inside the program. */
+    public static Unit si(Dimension dimension) {
+        for (Unit unit : values()) {
+            if (unit.dimension == dimension && unit.toSi(1) == 1) {
+                return unit;
+            }
+        }
+        throw new IllegalStateException("no SI unit for " + dimension);
+    }
+
     /**
      * The unit with this spelling. Exact spelling first, then without regard to case where that leaves no doubt (so
      * {@code MM} and {@code Hours} are read, but {@code M} is never taken for a metre nor {@code MG} for anything but mg).

@@ -12,7 +12,9 @@ public final class History<T> {
 
     private record Step<T>(T value, String act) {}
 
-    private T now;
+    /** Set from one thread; a background task that saves may read it. */
+    private volatile T now;
+
     private final Deque<Step<T>> past = new ArrayDeque<>();
     private final Deque<Step<T>> future = new ArrayDeque<>();
 

@@ -12,7 +12,8 @@ import soakline.quantity.Quantity;
  * @param temperature of the test, K
  * @param dryMass kg
  * @param balance standard uncertainty of one weighing, in kg (or as a fraction where contents were weighed out elsewhere)
- * @param other facts this program does not know, kept in their order
+ * @param other facts that take no part in an estimate, kept in their order: those this program does not know, and the calendar
+ *     time of time zero ({@link RunFileWords#TIME_ZERO})
  */
 public record Facts(
         String specimen,
@@ -28,7 +29,7 @@ public record Facts(
         Optional<String> note,
         List<Other> other) {
 
-    /** A fact under a name that this program does not know. */
+    /** A fact that takes no part in an estimate. */
     public record Other(String name, String value) {}
 
     public Facts {
@@ -152,5 +153,10 @@ public record Facts(
                 balance,
                 note,
                 other);
+    }
+
+    public Facts withOther(List<Other> value) {
+        return new Facts(
+                specimen, thickness, width, length, faces, edges, temperature, medium, dryMass, balance, note, value);
     }
 }

@@ -13,7 +13,6 @@ import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.PosixFileAttributeView;
-import java.util.UUID;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 
@@ -49,8 +48,8 @@ public final class OutputFile {
      */
     public static void write(Path target, Content content) {
         Path place = place(target);
-        // short, whatever the length of the target's own name
-        Path temporary = place.resolveSibling(".soakline-" + UUID.randomUUID() + ".tmp");
+        Leftovers.remove(place.getParent());
+        Path temporary = place.resolveSibling(Leftovers.newName());
         boolean done = false;
         try {
             fill(temporary, content);
@@ -69,6 +68,7 @@ public final class OutputFile {
     private static void fill(Path temporary, Content content) throws IOException {
         try (FileChannel channel =
                 FileChannel.open(temporary, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE)) {
+            Leftovers.markAsLiving(channel);
             OutputStream out = new BufferedOutputStream(Channels.newOutputStream(channel), BUFFER);
             content.writeTo(out);
             out.flush();

@@ -140,7 +140,7 @@ class FactsTest {
                 .extracting(r -> r.facts().thickness().orElseThrow().si())
                 .containsExactly(2e-3, 1e-3);
         assertThat(runs).extracting(r -> r.facts().faces().orElseThrow()).containsOnly(Faces.BOTH);
-        assertThat(runs.get(0).facts().other()).containsExactly(new Facts.Other("A1 colour", "red"));
+        assertThat(runs.get(0).facts().other()).containsExactly(new Facts.Other("colour", "red"));
         assertThat(runs.get(1).facts().other()).isEmpty();
         assertThat(runs.get(0).weighings().used()).isEqualTo(3);
         assertThat(runs.get(1).weighings().size()).isEqualTo(2);

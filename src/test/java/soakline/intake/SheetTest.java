@@ -48,7 +48,9 @@ class SheetTest {
         assertThat(run.name()).isEqualTo("P-07");
         assertThat(run.facts().thickness().orElseThrow().toString()).isEqualTo("2.03 mm ± 0.01 mm");
         assertThat(run.facts().dryMass().orElseThrow().si()).isCloseTo(0.0312041, within(1e-15));
-        assertThat(run.facts().other()).containsExactly(new Facts.Other("resin", "batch 12"));
+        assertThat(run.facts().other())
+                .containsExactly(
+                        new Facts.Other("resin", "batch 12"), new Facts.Other("time zero", "2026-03-01 06:00"));
         assertThat(Reading.times(run)).containsExactly(0, 21_600, 172_800);
         assertThat(Reading.values(run)).containsExactly(new double[] {0.0315, 0.03225, 0.033}, within(1e-12));
         assertThat(run.weighings().reason(1)).contains("wet");
