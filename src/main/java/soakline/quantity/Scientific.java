@@ -24,6 +24,12 @@ public final class Scientific {
         return rounded(value * scale, decimals(uncertainty * scale)) + power(exponent);
     }
 
+    /** The value with all its digits, for what somebody typed in. */
+    public static String exact(double value) {
+        int exponent = exponent(value);
+        return Numbers.shortest(value * Math.pow(10, -exponent)).replace('-', '−') + power(exponent);
+    }
+
     /** The interval with the power of ten of the value it belongs to; an open side is said in words. */
     public static String interval(double value, OptionalDouble low, OptionalDouble high) {
         if (low.isEmpty() && high.isEmpty()) {
