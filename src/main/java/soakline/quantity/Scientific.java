@@ -14,12 +14,12 @@ public final class Scientific {
 
     private Scientific() {}
 
-    /** The value rounded to two digits of its uncertainty. */
+    /** The value rounded to two digits of its uncertainty, with the power of ten of the larger of the two. */
     public static String value(double value, double uncertainty) {
         if (!(uncertainty > 0) || !Double.isFinite(uncertainty)) {
             return withPower(Numbers.significant(value, 4));
         }
-        int exponent = exponent(value);
+        int exponent = exponent(Math.max(Math.abs(value), uncertainty));
         double scale = Math.pow(10, -exponent);
         return rounded(value * scale, decimals(uncertainty * scale)) + power(exponent);
     }
@@ -30,7 +30,7 @@ public final class Scientific {
         return Numbers.shortest(value * Math.pow(10, -exponent)).replace('-', '−') + power(exponent);
     }
 
-    /** The interval with the power of ten of the value it belongs to; an open side is said in words. */
+    /** The interval with the power of ten of the value it belongs to, or of its own reach; an open side is said in words. */
     public static String interval(double value, OptionalDouble low, OptionalDouble high) {
         if (low.isEmpty() && high.isEmpty()) {
             return "open on both sides";
@@ -43,7 +43,7 @@ public final class Scientific {
         }
         double a = low.getAsDouble();
         double b = high.getAsDouble();
-        int exponent = exponent(value);
+        int exponent = exponent(Math.max(Math.abs(value), (b - a) / 2));
         double scale = Math.pow(10, -exponent);
         int decimals = decimals((b - a) / 2 * scale);
         String limits = rounded(a * scale, decimals) + " … " + rounded(b * scale, decimals);
