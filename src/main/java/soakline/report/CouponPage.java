@@ -12,7 +12,7 @@ import java.util.List;
  * @param results D and M∞ in large
  * @param overview D and M∞ as one line each of a table, with their intervals
  * @param intervalHead what the intervals are
- * @param combined empty texts where there is no combined uncertainty
+ * @param combined one or none
  */
 record CouponPage(
         String anchor,
@@ -24,10 +24,10 @@ record CouponPage(
         List<Result> results,
         List<String> overview,
         List<String> problems,
-        List<Fact> facts,
+        List<FactRow> facts,
         List<ParameterRow> parameters,
         String intervalHead,
-        String combined,
+        List<Combined> combined,
         List<Contribution> contributions,
         String fit,
         Markup drawing,
@@ -49,6 +49,9 @@ record CouponPage(
     /** What is known about the coupon. */
     record Fact(String name, String value) {}
 
+    /** One fact with a long value, or two with short ones. */
+    record FactRow(List<Fact> pair, List<Fact> single) {}
+
     /** A parameter with its interval. */
     record ParameterRow(String name, String value, String error, String interval, String unit) {}
 
@@ -59,8 +62,15 @@ record CouponPage(
      */
     record Contribution(String source, String share, String width, String sensitivity, String relative) {}
 
-    /** A check with its verdict. */
-    record CheckRow(Mark verdict, String name, String sentence, String classic) {}
+    /**
+     * A check with its verdict.
+     *
+     * @param classic what its own classic formula gives, with its interval; empty where there is none
+     */
+    record CheckRow(Mark verdict, String name, String sentence, String classic, String interval) {}
+
+    /** The uncertainty of D with that of the coupon's lengths. */
+    record Combined(String symbol, String uncertainty, String level, String interval, String freedom) {}
 
     boolean hasProblems() {
         return !problems.isEmpty();
@@ -68,9 +78,5 @@ record CouponPage(
 
     boolean hasNotes() {
         return !notes.isEmpty();
-    }
-
-    boolean hasCombined() {
-        return !combined.isEmpty();
     }
 }

@@ -18,15 +18,11 @@ import soakline.quantity.Numbers;
 import soakline.quantity.ResultUnit;
 import soakline.quantity.Scientific;
 import soakline.report.CouponPage.CheckRow;
+import soakline.report.CouponPage.Combined;
 import soakline.report.CouponPage.Contribution;
-import soakline.report.CouponPage.Fact;
 import soakline.report.CouponPage.Mark;
 import soakline.report.CouponPage.ParameterRow;
 import soakline.report.CouponPage.Result;
-import soakline.specimen.ContentSeries;
-import soakline.specimen.Edges;
-import soakline.specimen.Faces;
-import soakline.specimen.Facts;
 import soakline.wording.Wording;
 
 /** Turns an assessment into a {@link CouponPage}. */
@@ -64,7 +60,7 @@ final class CouponPageWriter {
                 writer.results(),
                 writer.overview(),
                 sentences(assessment.problems()),
-                writer.facts(),
+                FactRows.of(assessment),
                 assessment.parameters().stream().map(writer::parameter).toList(),
                 writer.intervalHead(),
                 writer.combined(),
@@ -105,7 +101,7 @@ final class CouponPageWriter {
         return switch (assessment.fickian()) {
             case PASS -> "Usable";
             case CAUTION -> "Usable with caution";
-            case FAIL -> "Not Fickian: an apparent D only";
+            case FAIL -> "An apparent D only";
             case UNKNOWN -> "Usable, with Fick’s law not judged";
         };
     }
@@ -184,37 +180,6 @@ final class CouponPageWriter {
         return Numbers.shortest(level * PERCENT) + " %";
     }
 
-    private List<Fact> facts() {
-        Facts facts = assessment.run().facts();
-        List<Fact> list = new ArrayList<>();
-        if (!assessment.run().source().isEmpty()) {
-            list.add(new Fact("File", assessment.run().source()));
-        }
-        facts.thickness().ifPresent(q -> list.add(new Fact("Thickness", q.toString())));
-        facts.faces().ifPresent(f -> list.add(new Fact("Faces exposed", f == Faces.BOTH ? "both" : "one")));
-        list.add(new Fact("Edges", facts.edges().filter(e -> e == Edges.BARE).isPresent() ? "bare" : "sealed"));
-        facts.width().ifPresent(q -> list.add(new Fact("Width", q.toString())));
-        facts.length().ifPresent(q -> list.add(new Fact("Length", q.toString())));
-        facts.dryMass().ifPresent(q -> list.add(new Fact("Dry mass", q.toString())));
-        facts.temperature().ifPresent(q -> list.add(new Fact("Temperature", q.toString())));
-        facts.medium().ifPresent(m -> list.add(new Fact("Medium", m)));
-        facts.balance().ifPresent(q -> list.add(new Fact("Balance, one weighing", "± " + q)));
-        list.add(new Fact("Direction", assessment.direction().code()));
-        list.add(new Fact("Content relative to", reference()));
-        facts.note().ifPresent(n -> list.add(new Fact("Note", n)));
-        facts.other().forEach(o -> list.add(new Fact(o.name(), o.value())));
-        return list;
-    }
-
-    private String reference() {
-        ContentSeries data = assessment.estimate().task().data();
-        return switch (data.reference()) {
-            case DRY_MASS -> "the dry mass";
-            case FIRST_WEIGHING -> "the first weighing";
-            case AS_GIVEN -> "as given in the file";
-        };
-    }
-
     private String intervalHead() {
         return assessment.parameters().stream()
                 .flatMap(p -> p.interval().stream())
@@ -235,24 +200,21 @@ final class CouponPageWriter {
                 name, value(p), error > 0 ? Scientific.value(error, error) : NOTHING, interval, unit.symbol());
     }
 
-    private String combined() {
-        if (!assessment.determined() || assessment.combined().isEmpty()) {
-            return "";
+    private List<Combined> combined() {
+        OptionalDouble d =
+                assessment.parameter(DIFFUSIVITY).map(ParameterResult::value).orElse(OptionalDouble.empty());
+        if (!assessment.determined() || assessment.combined().isEmpty() || d.isEmpty()) {
+            return List.of();
         }
         CombinedUncertainty c = assessment.combined().get();
         double u = c.standardUncertainty();
-        double d = assessment
-                .parameter(DIFFUSIVITY)
-                .map(ParameterResult::value)
-                .orElse(OptionalDouble.empty())
-                .orElse(u);
         double freedom = c.effectiveDegreesOfFreedom();
-        return "With the stated uncertainties of its lengths, " + symbol() + " has the standard uncertainty "
-                + Scientific.value(u, u) + " " + D_UNIT.symbol() + " and the " + level(c.level()) + " interval "
-                + Scientific.interval(d, c.low(), c.high()) + " " + D_UNIT.symbol()
-                + (Double.isFinite(freedom)
-                        ? " (" + Numbers.significant(freedom, 3) + " effective degrees of freedom)."
-                        : ".");
+        return List.of(new Combined(
+                symbol(),
+                Scientific.value(u, u) + " " + D_UNIT.symbol(),
+                level(c.level()),
+                Scientific.interval(d.getAsDouble(), c.low(), c.high()) + " " + D_UNIT.symbol(),
+                Double.isFinite(freedom) ? Numbers.significant(freedom, 3) : "very many"));
     }
 
     private List<Contribution> contributions() {
@@ -281,7 +243,7 @@ final class CouponPageWriter {
                 + assessment.run().weighings().size() + " weighings used, " + estimate.degreesOfFreedom()
                 + " degrees of freedom, "
                 + (estimate.isOptimum()
-                        ? "residual standard deviation " + Scientific.value(deviation, deviation / 10) + " %"
+                        ? "residual standard deviation " + Scientific.value(deviation, deviation / 10) + "\u00a0%"
                         : "not converged")
                 + ", " + estimate.evaluations() + " evaluations.";
     }
@@ -303,17 +265,26 @@ final class CouponPageWriter {
                         : ".");
     }
 
+    private static String bracketed(String interval) {
+        return interval.startsWith("(") ? interval : "(" + interval + ")";
+    }
+
     private CheckRow check(Check check) {
         String classic = "";
+        String interval = "";
         if (assessment.determined() && check.diffusivity().isPresent()) {
             double d = check.diffusivity().getAsDouble();
             boolean closed = check.low().isPresent() && check.high().isPresent();
             double error = closed ? (check.high().getAsDouble() - check.low().getAsDouble()) / 4 : Double.NaN;
-            classic = symbol() + " by this check alone: " + Scientific.value(d, error) + " " + D_UNIT.symbol()
-                    + (closed ? ", " + Scientific.interval(d, check.low(), check.high()) : "");
+            classic = symbol() + " = " + Scientific.value(d, error) + " " + D_UNIT.symbol();
+            interval = closed ? bracketed(Scientific.interval(d, check.low(), check.high())) : "";
         }
         return new CheckRow(
-                mark(check.verdict()), capital(check.name().words()), Wording.sentence(check.finding()) + ".", classic);
+                mark(check.verdict()),
+                capital(check.name().words()),
+                Wording.sentence(check.finding()) + ".",
+                classic,
+                interval);
     }
 
     private static String capital(String words) {

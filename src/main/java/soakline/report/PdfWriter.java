@@ -4,13 +4,17 @@ import com.openhtmltopdf.extend.FSObjectDrawer;
 import com.openhtmltopdf.extend.FSObjectDrawerFactory;
 import com.openhtmltopdf.outputdevice.helper.BaseRendererBuilder.FontStyle;
 import com.openhtmltopdf.outputdevice.helper.ExternalResourceControlPriority;
+import com.openhtmltopdf.pdfboxout.PDFontSupplier;
 import com.openhtmltopdf.pdfboxout.PdfBoxRenderer;
 import com.openhtmltopdf.pdfboxout.PdfRendererBuilder;
 import com.openhtmltopdf.util.XRLog;
 import java.awt.geom.Rectangle2D;
 import java.io.ByteArrayOutputStream;
+import java.io.Closeable;
 import java.io.IOException;
+import java.io.InputStream;
 import java.time.ZonedDateTime;
+import java.util.ArrayList;
 import java.util.GregorianCalendar;
 import java.util.List;
 import java.util.Map;
@@ -18,8 +22,11 @@ import java.util.function.IntFunction;
 import java.util.logging.Level;
 import java.util.logging.Logger;
 import java.util.stream.Stream;
+import org.apache.fontbox.ttf.TTFParser;
+import org.apache.fontbox.ttf.TrueTypeFont;
+import org.apache.pdfbox.io.RandomAccessReadBuffer;
 import org.apache.pdfbox.pdmodel.PDDocument;
-import org.apache.pdfbox.pdmodel.PDDocumentInformation;
+import org.apache.pdfbox.pdmodel.font.PDType0Font;
 import org.jfree.chart.JFreeChart;
 import org.w3c.dom.Element;
 
@@ -60,27 +67,59 @@ final class PdfWriter {
                 (uri, type) -> false, ExternalResourceControlPriority.RUN_BEFORE_RESOLVING_URI);
         builder.useFont(
                 () -> ReportFonts.open(ReportFonts.BODY_REGULAR), ReportFonts.BODY, REGULAR, FontStyle.NORMAL, true);
-        builder.useFont(() -> ReportFonts.open(ReportFonts.BODY_BOLD), ReportFonts.BODY, BOLD, FontStyle.NORMAL, true);
-        builder.useFont(
-                () -> ReportFonts.open(ReportFonts.FALLBACK_REGULAR),
-                ReportFonts.FALLBACK,
-                REGULAR,
-                FontStyle.NORMAL,
-                true);
         builder.useReplacementText("\ufffd");
         builder.withProducer(ProgramVersion.text());
         builder.useObjectDrawerFactory(new Charts(charts));
+        if (RightToLeft.isIn(page)) {
+            builder.useUnicodeBidiSplitter(RightToLeft::new);
+            builder.useUnicodeBidiReorderer(new RightToLeft());
+        }
         builder.withHtmlContent(page, null);
-        try (PdfBoxRenderer renderer = builder.buildPdfRenderer();
-                PDDocument document = renderer.createPDFKeepOpen()) {
-            PDDocumentInformation information = document.getDocumentInformation();
-            information.setCreator(ProgramVersion.text());
-            information.setCreationDate(GregorianCalendar.from(made));
-            // instead of one made from the clock
-            document.setDocumentId(made.toInstant().toEpochMilli());
-            ByteArrayOutputStream out = new ByteArrayOutputStream();
-            document.save(out);
-            return out.toByteArray();
+        try (PDDocument document = new PDDocument();
+                Fonts fonts = new Fonts(document)) {
+            builder.usePDDocument(document);
+            builder.useFont(fonts.load(ReportFonts.BODY_REGULAR), ReportFonts.BODY, REGULAR, FontStyle.NORMAL, true);
+            builder.useFont(fonts.load(ReportFonts.BODY_BOLD), ReportFonts.BODY, BOLD, FontStyle.NORMAL, true);
+            builder.useFont(
+                    fonts.load(ReportFonts.FALLBACK_REGULAR), ReportFonts.FALLBACK, REGULAR, FontStyle.NORMAL, true);
+            try (PdfBoxRenderer renderer = builder.buildPdfRenderer()) {
+                renderer.createPDFWithoutClosing();
+                document.getDocumentInformation().setCreator(ProgramVersion.text());
+                document.getDocumentInformation().setCreationDate(GregorianCalendar.from(made));
+                // instead of one made from the clock
+                document.setDocumentId(made.toInstant().toEpochMilli());
+                ByteArrayOutputStream out = new ByteArrayOutputStream();
+                document.save(out);
+                return out.toByteArray();
+            }
+        }
+    }
+
+    /** The fonts of a document, open until it is saved. */
+    private static final class Fonts implements Closeable {
+
+        private final PDDocument document;
+        private final List<TrueTypeFont> open = new ArrayList<>();
+
+        Fonts(PDDocument document) {
+            this.document = document;
+        }
+
+        PDFontSupplier load(String file) throws IOException {
+            try (InputStream in = ReportFonts.open(file)) {
+                TrueTypeFont font = new TTFParser().parse(new RandomAccessReadBuffer(in));
+                open.add(font);
+                // ligatures would be found by nobody who searches for the letters
+                font.setEnableGsub(false);
+                return new PDFontSupplier(PDType0Font.load(document, font, true));
+            }
+        }
+
+        @Override
+        public void close() throws IOException {
+            for (TrueTypeFont font : open) {
+                font.close();
+            }
         }
     }
 

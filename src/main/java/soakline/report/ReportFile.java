@@ -25,7 +25,7 @@ import soakline.workspace.OutputFile;
 public final class ReportFile {
 
     private static final int CHART_WIDTH = 642;
-    private static final int CHART_HEIGHT = 423;
+    private static final int CHART_HEIGHT = 393;
     private static final float CHART_FONT = 12;
     /** Only names in a page that was opened from the web; a browser needs none. */
     private static final Pattern NAMESPACES = Pattern.compile(" xmlns(:\\w+)?=(\"[^\"]*\"|'[^']*')");
@@ -75,7 +75,11 @@ public final class ReportFile {
             coupons.add(CouponPageWriter.write(assessments.get(i), "coupon-" + (i + 1), drawing(i)));
         }
         boolean forPdf = type == ReportType.PDF;
-        String page = ReportTemplate.fill(ReportPage.of(input, forPdf, ReportTemplate.css(forPdf), coupons));
+        ReportPage words = ReportPage.of(input, forPdf, ReportTemplate.css(forPdf), coupons);
+        String page = ReportTemplate.fill(words);
+        if (forPdf && !ReportFonts.canShow(page)) {
+            page = ReportTemplate.fill(words.withUnshown());
+        }
         try {
             return forPdf
                     ? PdfWriter.write(page, input.made(), this::chartOfPdf)

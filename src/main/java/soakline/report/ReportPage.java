@@ -18,13 +18,15 @@ import soakline.wording.Wording;
  * A report as its template shows it.
  *
  * @param forPdf whether it becomes a PDF
+ * @param hasUnshown whether it has letters that the fonts of a PDF lack
  * @param footer what the foot of each page says beside its number
  * @param several whether there is more than one coupon
- * @param level of the headings of a coupon's parts
+ * @param rank of the headings of a coupon's parts
  * @param unlike what the coupons differ in; empty when in nothing
  */
 record ReportPage(
         boolean forPdf,
+        boolean hasUnshown,
         Markup css,
         String title,
         String subject,
@@ -33,14 +35,14 @@ record ReportPage(
         String footer,
         String heading,
         boolean several,
-        int level,
+        int rank,
         List<SpreadRow> spreads,
         String unlike,
         List<CouponPage> coupons,
         List<SourceFile> files,
         Method method) {
 
-    private static final int LONGEST_IN_TITLE = 60;
+    private static final int LONGEST_IN_TITLE = 45;
     private static final DateTimeFormatter DATE = DateTimeFormatter.ofPattern("uuuu-MM-dd HH:mm", Locale.ROOT);
 
     /** A parameter over several coupons. */
@@ -81,6 +83,7 @@ record ReportPage(
         Replicates replicates = Replicates.of(input.assessments());
         return new ReportPage(
                 forPdf,
+                false,
                 css,
                 called + " – Soakline report",
                 "Diffusivity and equilibrium content from weighings, with intervals and checks",
@@ -97,6 +100,13 @@ record ReportPage(
                 coupons,
                 input.files(),
                 Method.of(input.assessments()));
+    }
+
+    /** The same, saying that some letters are not shown. */
+    ReportPage withUnshown() {
+        return new ReportPage(
+                forPdf, true, css, title, subject, program, made, footer, heading, several, rank, spreads, unlike,
+                coupons, files, method);
     }
 
     boolean hasSpreads() {

@@ -21,8 +21,10 @@ import soakline.specimen.Weighings;
  * @param summary how many there are, and how many of them are left out
  * @param hasMass whether there is a column of masses
  * @param hasResidual whether there is a curve to compare with
+ * @param hasAside whether there is a column for those set aside
  */
-record WeighingTable(String summary, String timeHead, boolean hasMass, boolean hasResidual, List<Row> rows) {
+record WeighingTable(
+        String summary, String timeHead, boolean hasMass, boolean hasResidual, boolean hasAside, List<Row> rows) {
 
     /**
      * A weighing, or a gap where some are left out.
@@ -46,6 +48,7 @@ record WeighingTable(String summary, String timeHead, boolean hasMass, boolean h
     /** And so many of those set aside. */
     static final int MOST_ASIDE = 60;
 
+    private static final int SMALLEST_GAP = 2;
     private static final double PERCENT = 100;
     private static final double GRAMS = 1000;
     private static final int MOST_TIME_DECIMALS = 4;
@@ -53,7 +56,7 @@ record WeighingTable(String summary, String timeHead, boolean hasMass, boolean h
 
     /** The number of columns. */
     int columns() {
-        return 4 + (hasMass ? 1 : 0) + (hasResidual ? 1 : 0);
+        return 3 + (hasMass ? 1 : 0) + (hasResidual ? 1 : 0) + (hasAside ? 1 : 0);
     }
 
     static WeighingTable of(Assessment assessment) {
@@ -103,7 +106,17 @@ record WeighingTable(String summary, String timeHead, boolean hasMass, boolean h
                 }
             }
             weighings.setAside().keySet().stream().limit(MOST_ASIDE).forEach(indices::add);
-            return new ArrayList<>(indices);
+            List<Integer> all = new ArrayList<>();
+            int last = -1;
+            for (int i : indices) {
+                // saying that so few are left out would take as much room
+                for (int left = last + 1; left < i && i - last - 1 <= SMALLEST_GAP; left++) {
+                    all.add(left);
+                }
+                all.add(i);
+                last = i;
+            }
+            return all;
         }
 
         WeighingTable table() {
@@ -128,7 +141,8 @@ record WeighingTable(String summary, String timeHead, boolean hasMass, boolean h
                         weighings.reason(i).orElse("")));
                 last = i;
             }
-            return new WeighingTable(summary(), "t [" + unit.symbol() + "]", mass, residual, rows);
+            return new WeighingTable(
+                    summary(), "t [" + unit.symbol() + "]", mass, residual, weighings.used() < weighings.size(), rows);
         }
 
         private String summary() {
