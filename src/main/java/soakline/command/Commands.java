@@ -1,16 +1,14 @@
 package soakline.command;
 
-import java.io.IOException;
-import java.io.InputStream;
 import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
-import java.util.Properties;
 import java.util.function.IntSupplier;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 import soakline.problem.Finding;
+import soakline.report.ProgramVersion;
 import soakline.session.RunReader;
 
 /** The command line: arguments to exit status. No exception leaves it, and no stack trace reaches a user. */
@@ -55,7 +53,7 @@ public final class Commands {
         String first = arguments.length == 0 ? "--help" : arguments[0];
         switch (first) {
             case "-h", "--help", "help" -> console.result(HELP);
-            case "-V", "--version" -> console.result("Soakline " + version() + "\n");
+            case "-V", "--version" -> console.result(ProgramVersion.text() + "\n");
             case ESTIMATE -> {
                 return estimate(Arrays.asList(arguments).subList(1, arguments.length));
             }
@@ -98,15 +96,5 @@ public final class Commands {
             console.tell(Finding.of(Code.UNEXPECTED, e.toString()));
             return ExitStatus.BAD_INPUT;
         }
-    }
-
-    private static String version() {
-        Properties properties = new Properties();
-        try (InputStream in = Commands.class.getResourceAsStream("/soakline/version.properties")) {
-            properties.load(in);
-        } catch (IOException e) {
-            return "of unknown version";
-        }
-        return properties.getProperty("version");
     }
 }

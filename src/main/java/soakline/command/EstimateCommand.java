@@ -1,6 +1,8 @@
 package soakline.command;
 
 import java.nio.file.Path;
+import java.time.ZoneId;
+import java.time.ZonedDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -12,9 +14,14 @@ import soakline.quantity.Dimension;
 import soakline.quantity.Quantity;
 import soakline.report.FigureFile;
 import soakline.report.FigureType;
+import soakline.report.ReportFile;
+import soakline.report.ReportInput;
+import soakline.report.ReportType;
 import soakline.report.ResultFormat;
+import soakline.report.SourceFile;
 import soakline.session.EstimateCoupons;
 import soakline.session.EstimateRequest;
+import soakline.session.ReportSources;
 import soakline.session.RunReader;
 import soakline.specimen.Edges;
 import soakline.specimen.Faces;
@@ -27,22 +34,26 @@ final class EstimateCommand {
     private final EstimateRequest request;
     private final ResultFormat format;
     private final Optional<Path> figure;
+    private final Optional<Path> report;
 
-    private EstimateCommand(EstimateRequest request, ResultFormat format, Optional<Path> figure) {
+    private EstimateCommand(
+            EstimateRequest request, ResultFormat format, Optional<Path> figure, Optional<Path> report) {
         this.request = request;
         this.format = format;
         this.figure = figure;
+        this.report = report;
     }
 
     /** Files as they stand, as text. */
     static EstimateCommand of(Path file) {
-        return new EstimateCommand(EstimateRequest.of(List.of(file)), ResultFormat.TEXT, Optional.empty());
+        return new EstimateCommand(
+                EstimateRequest.of(List.of(file)), ResultFormat.TEXT, Optional.empty(), Optional.empty());
     }
 
     /**
      * From the words of the command line.
      *
-     * @throws soakline.problem.Fault when they make no sense, or the figure could not be written
+     * @throws soakline.problem.Fault when they make no sense, or the figure or the report could not be written
      */
     static EstimateCommand of(Words words) {
         List<Path> files = new ArrayList<>();
@@ -67,10 +78,12 @@ final class EstimateCommand {
                                 List.of(ResultFormat.TEXT.code(), ResultFormat.JSON.code(), ResultFormat.CSV.code()),
                                 List.of(ResultFormat.TEXT, ResultFormat.JSON, ResultFormat.CSV))
                         .orElse(ResultFormat.TEXT),
-                figure(words));
+                figure(words),
+                report(words));
     }
 
     int run(RunReader reader, Console console) {
+        List<SourceFile> sources = report.isPresent() ? ReportSources.of(request.files()) : List.of();
         EstimateCoupons.Outcome outcome = new EstimateCoupons(reader).run(request, EstimateCoupons.UNWATCHED);
         int status = ExitStatus.DONE;
         for (Finding failure : outcome.failures()) {
@@ -83,6 +96,11 @@ final class EstimateCommand {
         List<Assessment> assessments = outcome.assessments();
         String result = format.write(assessments);
         figure.ifPresent(file -> FigureFile.write(file, assessments));
+        if (report.isPresent()) {
+            ReportSources.requireUnchanged(request.files(), sources);
+            ReportFile.write(
+                    report.get(), new ReportInput(assessments, sources, ZonedDateTime.now(ZoneId.systemDefault())));
+        }
         for (Assessment assessment : assessments) {
             String name = assessment.run().name();
             assessment.notes().forEach(note -> console.tell(note, name));
@@ -138,6 +156,15 @@ final class EstimateCommand {
             OutputFile.requireWritable(file);
         });
         return figure;
+    }
+
+    private static Optional<Path> report(Words words) {
+        Optional<Path> report = words.value(EstimateOptions.REPORT).map(OptionValues::path);
+        report.ifPresent(file -> {
+            ReportType.of(file);
+            OutputFile.requireWritable(file);
+        });
+        return report;
     }
 
     private static Optional<Quantity> length(Words words, String option, String example) {

@@ -21,6 +21,7 @@ final class EstimateOptions {
     static final String NOISE = "--noise";
     static final String FORMAT = "--format";
     static final String FIGURE = "--figure";
+    static final String REPORT = "--report";
     static final String COLUMNS = "--columns";
     static final String DATE_PATTERN = "--date-pattern";
 
@@ -52,7 +53,8 @@ final class EstimateOptions {
             once(INTERVAL, "profile|linearised", "how intervals are made; profile when nothing is said"),
             once(NOISE, "estimated", "where the scatter of the weighings is taken from: the residuals"),
             once(FORMAT, "text|json|csv", "form of the result on standard output; text when nothing is said"),
-            once(FIGURE, "FILE", "draws all coupons into a file that ends in .svg or .png"));
+            once(FIGURE, "FILE", "draws all coupons into a file that ends in .svg or .png"),
+            once(REPORT, "FILE", "writes a report on all coupons into a file that ends in .pdf or .html"));
 
     static final int WIDTH_OF_HELP = 100;
     static final String DESCRIPTION =

@@ -16,6 +16,7 @@ import org.jfree.chart.ui.RectangleInsets;
 import org.jfree.data.Range;
 import soakline.figure.ChartStyle.Ink;
 import soakline.inference.Assessment;
+import soakline.quantity.Unit;
 
 /** The picture of one coupon: content against √t with the fitted curve, and the residuals below on the same axis. */
 public final class CouponFigure {
@@ -51,6 +52,24 @@ public final class CouponFigure {
             plot.add(ResidualPlot.plot(assessment, points, rootTime, style), RESIDUAL_WEIGHT);
         }
         return framed(plot, assessment, points, content.range(), style);
+    }
+
+    /** The same without name and result, for a page that says them itself. What the picture leaves out is still said on it. */
+    public static JFreeChart chartWithoutHead(Assessment assessment, ChartStyle style) {
+        JFreeChart chart = chart(assessment, style);
+        chart.setTitle((TextTitle) null);
+        List<String> head = FigureWords.result(assessment);
+        for (int i = chart.getSubtitleCount() - 1; i >= 0; i--) {
+            if (chart.getSubtitle(i) instanceof TextTitle line && head.contains(line.getText())) {
+                chart.removeSubtitle(line);
+            }
+        }
+        return chart;
+    }
+
+    /** The unit in which a test of some length is read. */
+    public static Unit timeUnit(double seconds) {
+        return RootTime.forSpan(seconds).unit();
     }
 
     /** The same axis read in t, along the top; it follows the √t axis when that is zoomed. */

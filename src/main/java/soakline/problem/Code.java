@@ -23,6 +23,7 @@ public enum Code {
     FILE_EMPTY(Kind.INPUT),
     FILE_BINARY(Kind.INPUT),
     FILE_FAILED(Kind.INPUT),
+    FILE_CHANGED(Kind.INPUT),
     LINE_TOO_LONG(Kind.INPUT),
     QUOTES_NOT_CLOSED(Kind.INPUT),
     SHEET_NOT_READABLE(Kind.INPUT),

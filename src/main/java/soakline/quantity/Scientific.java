@@ -14,7 +14,7 @@ public final class Scientific {
 
     private Scientific() {}
 
-    /** The value rounded to two digits of its uncertainty. */
+    /** The value rounded to two digits of its uncertainty, with the power of ten of the larger of the two. */
     public static String value(double value, double uncertainty) {
         if (!(uncertainty > 0) || !Double.isFinite(uncertainty)) {
             return withPower(Numbers.significant(value, 4));
@@ -25,7 +25,13 @@ public final class Scientific {
         return rounded(value * scale, decimals(uncertainty * scale)) + power(exponent);
     }
 
-    /** The interval with the power of ten of the value it belongs to; an open side is said in words. */
+    /** The value with all its digits, for what somebody typed in. */
+    public static String exact(double value) {
+        int exponent = exponent(value);
+        return Numbers.shortest(value * Math.pow(10, -exponent)).replace('-', '−') + power(exponent);
+    }
+
+    /** The interval with the power of ten of the value it belongs to, or of its own reach; an open side is said in words. */
     public static String interval(double value, OptionalDouble low, OptionalDouble high) {
         if (low.isEmpty() && high.isEmpty()) {
             return "open on both sides";

@@ -1,24 +1,16 @@
 package soakline.report;
 
 import java.awt.Color;
-import java.awt.Dimension;
 import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.io.OutputStream;
-import java.io.StringWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
 import javax.imageio.ImageIO;
-import javax.xml.parsers.DocumentBuilderFactory;
-import javax.xml.parsers.ParserConfigurationException;
-import org.apache.batik.svggen.SVGGeneratorContext;
-import org.apache.batik.svggen.SVGGraphics2D;
 import org.jfree.chart.JFreeChart;
-import org.w3c.dom.Document;
-import org.w3c.dom.Element;
 import soakline.figure.ChartStyle;
 import soakline.figure.CouponFigure;
 import soakline.inference.Assessment;
@@ -69,36 +61,8 @@ public final class FigureFile {
     }
 
     private static void svg(List<JFreeChart> charts, OutputStream out) throws IOException {
-        Document document = emptyDrawing();
-        SVGGeneratorContext context = SVGGeneratorContext.createDefault(document);
-        context.setComment("Soakline");
-        SVGGraphics2D graphics = new SVGGraphics2D(context, false);
-        graphics.setSVGCanvasSize(new Dimension(WIDTH, HEIGHT * charts.size()));
-        draw(charts, graphics);
-        StringWriter text = new StringWriter();
-        Element root = graphics.getRoot();
-        // so that a viewer can scale it
-        root.setAttribute("viewBox", "0 0 " + WIDTH + " " + HEIGHT * charts.size());
-        graphics.stream(root, text, true, false);
-        out.write(withoutDoctype(text.toString()).getBytes(StandardCharsets.UTF_8));
-    }
-
-    /** The type declaration names a page on the web, which strict readers fetch or, offline, fail on. */
-    private static String withoutDoctype(String svg) {
-        int from = svg.indexOf("<!DOCTYPE");
-        int to = svg.indexOf('>', from) + 1;
-        return from < 0 || to <= from ? svg : svg.substring(0, from) + svg.substring(to);
-    }
-
-    private static Document emptyDrawing() {
-        try {
-            return DocumentBuilderFactory.newDefaultInstance()
-                    .newDocumentBuilder()
-                    .getDOMImplementation()
-                    .createDocument("http://www.w3.org/2000/svg", "svg", null);
-        } catch (ParserConfigurationException e) {
-            throw new IllegalStateException(e);
-        }
+        String svg = SvgDrawing.of(WIDTH, HEIGHT * charts.size(), "", graphics -> draw(charts, graphics));
+        out.write(svg.getBytes(StandardCharsets.UTF_8));
     }
 
     private static void png(List<JFreeChart> charts, int scale, OutputStream out) throws IOException {

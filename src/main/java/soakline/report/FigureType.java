@@ -1,7 +1,6 @@
 package soakline.report;
 
 import java.nio.file.Path;
-import java.util.Locale;
 import soakline.problem.Code;
 import soakline.problem.Fault;
 
@@ -22,11 +21,8 @@ public enum FigureType {
      * @throws Fault {@link Code#OUTPUT_TYPE_UNKNOWN}
      */
     public static FigureType of(Path file) {
-        String name = String.valueOf(file.getFileName());
         for (FigureType type : values()) {
-            // a name that is nothing but the ending is a hidden file without one
-            if (name.length() > type.ending.length()
-                    && name.toLowerCase(Locale.ROOT).endsWith(type.ending)) {
+            if (FileEnding.isOf(file, type.ending)) {
                 return type;
             }
         }

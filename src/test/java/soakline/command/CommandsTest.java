@@ -193,7 +193,7 @@ class CommandsTest {
                 "estimate",
                 "estimate good.csv --thickness",
                 "estimate good.csv --faces both --faces one",
-                "estimate good.csv --report a.pdf",
+                "estimate good.csv --report a.docx",
                 "estimat good.csv",
                 "good.csv",
                 "--nonsense",

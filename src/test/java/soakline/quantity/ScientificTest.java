@@ -33,4 +33,20 @@ class ScientificTest {
         assertThat(Scientific.interval(1, OptionalDouble.empty(), OptionalDouble.empty()))
                 .isEqualTo("open on both sides");
     }
+
+    @Test
+    void aValueLostInItsUncertaintyIsReadOnTheScaleOfTheUncertainty() {
+        assertThat(Scientific.value(0.00052, 0.0035)).isEqualTo("0.0005");
+        assertThat(Scientific.interval(0.00052, OptionalDouble.of(-0.0066), OptionalDouble.of(0.0076)))
+                .isEqualTo("−0.0066 … 0.0076");
+        assertThat(Scientific.value(2e-13, 1.1e-12)).isEqualTo("0.2×10⁻¹²");
+    }
+
+    @Test
+    void whatWasTypedInKeepsItsDigits() {
+        assertThat(Scientific.exact(0)).isEqualTo("0");
+        assertThat(Scientific.exact(1.8)).isEqualTo("1.8");
+        assertThat(Scientific.exact(-0.25)).isEqualTo("−0.25");
+        assertThat(Scientific.exact(1.23456e-12)).isEqualTo("1.23456×10⁻¹²");
+    }
 }
